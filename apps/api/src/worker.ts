@@ -1,0 +1,23 @@
+import { createLog, MovableClock, openDatabase, readConfig, startWorker, systemClock } from '@seamwright/shared/server';
+import { buildHouse } from './house';
+import { untilStopped } from './until-stopped';
+
+async function main(): Promise<void> {
+  const config = readConfig(process.env);
+  const log = createLog(config.LOG_LEVEL, 'worker');
+  const database = openDatabase(config.WORKER_DATABASE_URL);
+  const clock = config.SEAMWRIGHT_MODE === 'production' ? systemClock : new MovableClock(database);
+  const { subscribers, periodic } = buildHouse({ config, database, clock });
+  const worker = await startWorker({ database, clock, log }, config.WORKER_DATABASE_URL, subscribers, periodic);
+  log.info('working');
+
+  await untilStopped();
+  log.info('draining');
+  await worker.stop();
+  await database.close();
+}
+
+main().catch((error: Error) => {
+  process.stderr.write(`${error.message}\n`);
+  process.exit(1);
+});

@@ -1,0 +1,28 @@
+import type { MessageTable } from './message-table';
+
+/** Refusals of catalogue, put into words. */
+export const catalogueMessages = {
+  'choice-unknown': (p) => $localize`There is no choice called ${p['choice']}:choice: on this specification.`,
+  'choice-value-unknown': (p) =>
+    $localize`${p['value']}:value: is not one of the values of ${p['choice']}:choice: on this specification.`,
+  'choice-pair-forbidden': (p) => $localize`That can't be chosen together: ${p['reason']}:reason:`,
+  'specification-withdrawn': (p) =>
+    $localize`${p['code']}:code: has been withdrawn and can't be ordered any more. Look in the catalogue for what is offered now.`,
+  'own-version': () => $localize`You wrote this version, so another person must approve it.`,
+  'version-weights-order': () =>
+    $localize`The smallest piece must not weigh more than the nominal one, nor that more than the largest.`,
+  'version-yields-over-one': (p) =>
+    $localize`The cut and everything else it gives add up to ${p['percent']}:percent: of the primal: at most 100 % can come out.`,
+  'version-fat-cover': () => $localize`The fat cover must be between 0 and 60 mm.`,
+  'version-dimensions': () => $localize`Length, width and height must each be at least 1 mm.`,
+  'version-step-empty': () => $localize`Say what is done in this step, or take it out.`,
+  'version-life': () => $localize`The life left at delivery can't be longer than the shelf life.`,
+  'version-storage': () => $localize`The lowest storage temperature can't be above the highest.`,
+  'version-gtin': () => $localize`This is not a GTIN: a digit is wrong or missing.`,
+  'version-choice-form': (p) =>
+    $localize`${p['value']}:value: can't stand in a choice's key or value: use small letters, digits and hyphens.`,
+  'version-choice-twice': (p) => $localize`${p['value']}:value: stands there twice.`,
+  'version-default-unknown': (p) => $localize`The usual value of ${p['choice']}:choice: is not among its values.`,
+  'version-rule-unknown': (p) => $localize`A rule speaks of ${p['value']}:value:, which can't be chosen here.`,
+  'version-defaults-impossible': (p) => $localize`The usual values can't stand together: ${p['reason']}:reason:`,
+} satisfies MessageTable;

@@ -1,0 +1,4 @@
+import type { MessageTable } from './message-table';
+
+/** Refusals of plant, put into words. */
+export const plantMessages = {} satisfies MessageTable;

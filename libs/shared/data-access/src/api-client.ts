@@ -1,0 +1,116 @@
+import { HttpClient, HttpErrorResponse, HttpHeaders, HttpParams, type HttpResponse } from '@angular/common/http';
+import { inject, Injectable } from '@angular/core';
+import { catchError, from, map, switchMap, throwError, type Observable } from 'rxjs';
+import type { Answer, AnyEndpoint, CallInput } from '@seamwright/shared/contracts';
+import { newId } from '@seamwright/shared/util';
+import { ACCESS_TOKEN_SOURCE } from './access-token';
+import { ApiProblem, asProblem } from './api-problem';
+
+export interface FileDownload {
+  readonly fileName: string;
+  readonly blob: Blob;
+}
+
+interface Sent {
+  params?: Record<string, unknown>;
+  query?: Record<string, unknown>;
+  body?: unknown;
+  ifMatch?: number;
+  idempotencyKey?: string;
+  file?: Blob;
+}
+
+/** Calls declared endpoints. Every error is an ApiProblem. */
+@Injectable({ providedIn: 'root' })
+export class ApiClient {
+  readonly #http = inject(HttpClient);
+  readonly #tokens = inject(ACCESS_TOKEN_SOURCE, { optional: true });
+
+  /** Calls an endpoint that answers JSON or nothing. */
+  call<E extends AnyEndpoint>(endpoint: E, input: CallInput<E>): Observable<Answer<E>> {
+    return this.#send(endpoint, input as Sent, 'json').pipe(map((response) => response.body as Answer<E>));
+  }
+
+  /** Fetches a file: no token stands in an address, so downloads come as blobs. */
+  download<E extends AnyEndpoint>(endpoint: E, input: CallInput<E>): Observable<FileDownload> {
+    return this.#send(endpoint, input as Sent, 'blob').pipe(
+      map((response) => ({ fileName: fileNameOf(response), blob: response.body as Blob })),
+    );
+  }
+
+  #send(endpoint: AnyEndpoint, input: Sent, kind: 'json' | 'blob'): Observable<HttpResponse<unknown>> {
+    // One key for the deed: a renewed token repeats it with the same one.
+    const key = endpoint.idempotent ? (input.idempotencyKey ?? newId()) : null;
+    const once = (token: string | null) => this.#request(endpoint, input, kind, key, token);
+    return once(this.#tokens?.current() ?? null).pipe(
+      catchError((error: unknown) => {
+        const refused = error instanceof HttpErrorResponse && error.status === 401 && endpoint.access.who === 'roles';
+        if (!refused || !this.#tokens) return throwError(() => error);
+        return this.#tokens.renew().pipe(switchMap((token) => (token ? once(token) : throwError(() => error))));
+      }),
+      catchError((error: unknown) =>
+        kind === 'blob' ? from(readBlobError(error)).pipe(switchMap(refuse)) : refuse(error),
+      ),
+    );
+  }
+
+  #request(
+    endpoint: AnyEndpoint,
+    input: Sent,
+    kind: 'json' | 'blob',
+    key: string | null,
+    token: string | null,
+  ): Observable<HttpResponse<unknown>> {
+    let headers = new HttpHeaders();
+    if (token) headers = headers.set('authorization', `Bearer ${token}`);
+    if (key) headers = headers.set('idempotency-key', key);
+    if (input.ifMatch !== undefined) headers = headers.set('if-match', `"${input.ifMatch}"`);
+    const options = {
+      headers,
+      params: queryOf(input.query),
+      body: bodyOf(endpoint, input),
+      observe: 'response' as const,
+    };
+    const address = addressOf(endpoint, input.params);
+    return kind === 'blob'
+      ? this.#http.request(endpoint.method, address, { ...options, responseType: 'blob' })
+      : this.#http.request(endpoint.method, address, { ...options, responseType: 'json' });
+  }
+}
+
+const refuse = (error: unknown) => throwError(() => new ApiProblem(asProblem(error)));
+
+function addressOf(endpoint: AnyEndpoint, params: Record<string, unknown> = {}): string {
+  return `/api/v1${endpoint.path.replace(/:(\w+)/g, (_, name: string) => encodeURIComponent(String(params[name])))}`;
+}
+
+function queryOf(query: Record<string, unknown> = {}): HttpParams {
+  let params = new HttpParams();
+  for (const [name, value] of Object.entries(query)) {
+    if (value === undefined || value === null) continue;
+    for (const each of Array.isArray(value) ? value : [value]) params = params.append(name, String(each));
+  }
+  return params;
+}
+
+function bodyOf(endpoint: AnyEndpoint, input: Sent): unknown {
+  if (!endpoint.upload) return input.body;
+  const form = new FormData();
+  for (const [name, value] of Object.entries((input.body ?? {}) as Record<string, unknown>))
+    form.append(name, String(value));
+  if (input.file) form.append('file', input.file);
+  return form;
+}
+
+function fileNameOf(response: HttpResponse<unknown>): string {
+  const match = /filename\*=UTF-8''([^;]+)/.exec(response.headers.get('content-disposition') ?? '');
+  return match?.[1] ? decodeURIComponent(match[1]) : 'download';
+}
+
+/** A refused download carries its problem document as a blob. */
+async function readBlobError(error: unknown): Promise<unknown> {
+  if (!(error instanceof HttpErrorResponse) || !(error.error instanceof Blob)) return error;
+  const { headers, status, statusText, url } = error;
+  const text = await new Response(error.error).text();
+  return new HttpErrorResponse({ error: text, headers, status, statusText, url: url ?? undefined });
+}

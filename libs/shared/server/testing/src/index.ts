@@ -1,0 +1,1 @@
+export { openTestHouse, TEST_NOW, type Called, type TestHouse } from './test-house';
