@@ -20,7 +20,10 @@ module.exports = {
       testPathIgnorePatterns: [...ignored, `/libs/[a-z]+/${clientRooms}/`, '<rootDir>/apps/(storefront|admin)/'],
       moduleNameMapper,
       transform: {
-        '^.+\\.(ts|mjs)$': ['@swc/jest', { jsc: { parser: { syntax: 'typescript', decorators: true }, target: 'es2022' } }],
+        '^.+\\.(ts|mjs)$': [
+          '@swc/jest',
+          { jsc: { parser: { syntax: 'typescript', decorators: true }, target: 'es2022' } },
+        ],
       },
       transformIgnorePatterns: ['node_modules/(?!@angular/localize/)'],
       setupFiles: ['<rootDir>/tools/test/node.setup.ts'],

@@ -7,7 +7,6 @@ const USAGE =
 
 async function main(command: string | undefined): Promise<void> {
   const database = process.env['SEAMWRIGHT_DATABASE'] ?? 'seamwright';
-  if (command === 'admin-sql') return void console.log(adminSql(database));
   const adminUrl = process.env['DATABASE_URL'];
   if (!adminUrl) throw new Error('DATABASE_URL must hold the address of an administrator of the PostgreSQL server.');
   switch (command) {
@@ -27,6 +26,8 @@ async function main(command: string | undefined): Promise<void> {
       if (run.status !== 0) throw new Error('kysely-codegen failed');
       return;
     }
+    case 'admin-sql':
+      return void console.log(adminSql(adminUrl, database));
     case 'drop':
       return dropDatabase(adminUrl, database);
     default:

@@ -33,15 +33,21 @@ export function roleUrls(adminUrl: string, database: string): RoleUrls {
   };
 }
 
-/** What an administrator may run by hand where the start command has no right to create roles and databases. */
-export function adminSql(database: string): string {
+/**
+ * What an administrator may run by hand where `adminUrl` has no right to create roles and databases. The passwords are
+ * the ones that the program derives from that address.
+ */
+export function adminSql(adminUrl: string, database: string): string {
+  const url = new URL(adminUrl);
   return [OWNER_ROLE, APP_ROLE, WORKER_ROLE]
-    .map((role) => `create role ${role} login nosuperuser nobypassrls password '…choose one…';`)
-    .concat(`create database ${database} owner ${OWNER_ROLE} encoding 'UTF8' template template0;`)
+    .map((role) => `create role ${role} login nosuperuser nobypassrls password '${passwordOf(role, url)}';`)
+    .concat(`grant ${OWNER_ROLE} to ${quoted(url.username)};`)
+    .concat(`create database ${quoted(database)} owner ${OWNER_ROLE} encoding 'UTF8' template template0;`)
     .concat(
-      `\\connect ${database}`,
+      `\\connect ${quoted(database)}`,
       'create extension if not exists btree_gist;',
       'create extension if not exists pg_trgm;',
+      `alter schema public owner to ${OWNER_ROLE};`,
     )
     .join('\n');
 }
@@ -52,11 +58,23 @@ export async function ensureRoles(adminUrl: string): Promise<void> {
   await withClient(adminUrl, async (client) => {
     for (const role of [OWNER_ROLE, APP_ROLE, WORKER_ROLE]) {
       const known = await client.query('select 1 from pg_roles where rolname = $1', [role]);
-      const verb = known.rowCount ? 'alter' : 'create';
-      await client.query(`${verb} role ${role} login nosuperuser nobypassrls password '${passwordOf(role, url)}'`);
+      // An administrator who is no superuser may set a password, but not say again what a role may not do.
+      const verb = known.rowCount ? `alter role ${role}` : `create role ${role} login nosuperuser nobypassrls`;
+      const statement = `${verb} password '${passwordOf(role, url)}'`;
+      if (known.rowCount) await unlessForbidden(client, statement);
+      else await client.query(statement);
     }
     // The owner must be grantable to the administrator for `create database … owner` without superuser rights.
-    await client.query(`grant ${OWNER_ROLE} to current_user`);
+    await unlessForbidden(client, `grant ${OWNER_ROLE} to current_user`);
+  });
+}
+
+const INSUFFICIENT_PRIVILEGE = '42501';
+
+/** For what an administrator may have done by hand already (see adminSql), where this connection has no right to. */
+async function unlessForbidden(client: Client, statement: string): Promise<void> {
+  await client.query(statement).catch((error: Error & { code?: string }) => {
+    if (error.code !== INSUFFICIENT_PRIVILEGE) throw error;
   });
 }
 
@@ -72,7 +90,7 @@ export async function ensureDatabase(adminUrl: string, database: string): Promis
   inside.pathname = `/${database}`;
   await withClient(inside.toString(), async (client) => {
     await client.query('create extension if not exists btree_gist; create extension if not exists pg_trgm');
-    await client.query(`alter schema public owner to ${OWNER_ROLE}`);
+    await unlessForbidden(client, `alter schema public owner to ${OWNER_ROLE}`);
   });
   return made;
 }

@@ -1,0 +1,1 @@
+export function forTerminal(line: string, stream: 'out' | 'err'): string | undefined;

@@ -1,0 +1,3 @@
+export const kinds: string[];
+export const usage: string;
+export function readChoice(words: string[]): { kinds: string[]; keep: boolean; help: boolean };
