@@ -6,6 +6,7 @@ import {
   STOREYS,
   PLACES,
   builtinRefusal,
+  furtherEntries,
   mayReachPlace,
   mayReachRoom,
   mayUseDatabase,
@@ -38,13 +39,14 @@ export function placeOf(relative) {
   return kind && { unit: kind, kind, spec };
 }
 
-/** Splits `@seamwright/<storey>/<room>[/testing]`; the answer is a place, or `{problem}` when it is no way in. */
+/** Splits `@seamwright/<storey>/<room>[/testing or a further entry]`; the answer is a place, or `{problem}` when it is no way in. */
 function placeOfAlias(specifier) {
   const [storey, room, ...deeper] = specifier.slice(ALIAS.length).split('/');
   const place = placeOf(`libs/${storey}/${room}`);
   if (place.problem) return place;
   if (deeper.length === 0) return place;
   if (deeper.length === 1 && deeper[0] === 'testing') return { ...place, testing: true };
+  if (deeper.length === 1 && furtherEntries(storey, room).includes(deeper[0])) return place;
   return { problem: `'${specifier}' reaches past the entry: import from '${ALIAS}${storey}/${room}'` };
 }
 

@@ -25,6 +25,14 @@ export function roomKind(storey, folder) {
   return STOREY_ROOMS.includes(folder) ? folder : undefined;
 }
 
+/**
+ * Rooms with more than one way in: what an application's first load needs stands apart, since the bundler keeps whole
+ * files together and one index would pull tables and forms into it.
+ */
+const FURTHER_ENTRIES = { 'shared/ui': ['frame', 'table', 'forms'] };
+
+export const furtherEntries = (storey, room) => FURTHER_ENTRIES[`${storey}/${room}`] ?? [];
+
 // How far a room may reach for a room of another kind, or of its own kind elsewhere.
 const OWN = 'own'; // its own storey
 const LOWER = 'lower'; // storeys under it

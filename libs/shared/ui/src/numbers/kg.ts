@@ -1,0 +1,17 @@
+import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
+import { KgPipe } from './kg.pipe';
+
+/** A weight in kilograms with its unit in a lighter weight after a thin space. */
+@Component({
+  selector: 'sw-kg',
+  imports: [KgPipe],
+  template: `<span [textContent]="grams() | swKg: 'bare'"></span><span class="sw-unit" [textContent]="unit()"></span>`,
+  styleUrl: './number.scss',
+  changeDetection: ChangeDetectionStrategy.OnPush,
+})
+export class Kg {
+  /** Whole grams; nothing is shown for null. */
+  readonly grams = input.required<number | null>();
+
+  protected readonly unit = computed(() => (this.grams() === null ? '' : '\u2009kg'));
+}
