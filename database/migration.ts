@@ -20,9 +20,16 @@ export function customerRows(table: string, column = 'customer_id', site?: strin
     );`;
 }
 
-/** SQL that writes every change of a table to the audit, leaving out the named columns. */
-export function audited(table: string, secretColumns: readonly string[] = []): string {
-  const args = secretColumns.map((column) => `'${column}'`).join(', ');
+interface Audited {
+  /** Names the row in the audit. */
+  readonly key?: string;
+  /** Columns that are never written down. */
+  readonly secret?: readonly string[];
+}
+
+/** SQL that writes every change of a table to the audit. */
+export function audited(table: string, { key = 'id', secret = [] }: Audited = {}): string {
+  const args = [key, ...secret].map((column) => `'${column}'`).join(', ');
   return `
     create trigger ${table}_audit after insert or update or delete on ${table}
       for each row execute function write_audit(${args});`;

@@ -79,6 +79,17 @@ describe('the schema', () => {
     await expect(attempt).rejects.toThrow(/permission denied/);
   });
 
+  it('names the row of every audited table by a column that it has', async () => {
+    const nameless = await ask<{ table: string; key: string }>(`
+      select c.relname as table, k.key
+      from pg_trigger t
+      join pg_class c on c.oid = t.tgrelid
+      cross join lateral (select convert_from(substring(t.tgargs for position('\\000'::bytea in t.tgargs) - 1), 'UTF8') as key) k
+      where t.tgfoid = 'write_audit'::regproc
+        and not exists (select 1 from pg_attribute a where a.attrelid = c.oid and a.attname = k.key)`);
+    expect(nameless).toEqual([]);
+  });
+
   it('has an index under every foreign key that rows are removed or looked up by', async () => {
     const bare = await ask<{ name: string }>(`
       select con.conname as name from pg_constraint con

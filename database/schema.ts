@@ -349,17 +349,21 @@ export interface Packs {
 }
 
 export interface PaymentCards {
-  brand: string;
+  brand: string | null;
   createdAt: Timestamp;
   customerId: string;
-  expires: string;
+  declineCode: string | null;
+  expires: string | null;
   id: string;
-  last4: string;
+  last4: string | null;
   processorMethodId: string;
-  removedAt: Timestamp | null;
+  state: string;
+  updatedAt: Timestamp;
 }
 
 export interface Payments {
+  actionUrl: string | null;
+  capturedAt: Timestamp | null;
   capturedMinor: Generated<number>;
   createdAt: Timestamp;
   currency: string;
@@ -514,6 +518,12 @@ export interface PriceLists {
   id: string;
   level: string;
   name: string;
+}
+
+export interface ProcessorBalances {
+  amountMinor: number;
+  currency: string;
+  readAt: Timestamp;
 }
 
 export interface ProcessorCustomers {
@@ -693,6 +703,7 @@ export interface SpecificationVersions {
   pieceNominalGrams: number;
   piecesPerPack: number;
   removed: Generated<string[]>;
+  ribs: number | null;
   rowVersion: Generated<number>;
   shelfLifeDays: number;
   sourceNodeId: string;
@@ -760,6 +771,7 @@ export interface DB {
   priceBreaks: PriceBreaks;
   priceLines: PriceLines;
   priceLists: PriceLists;
+  processorBalances: ProcessorBalances;
   processorCustomers: ProcessorCustomers;
   processorEvents: ProcessorEvents;
   processorPayouts: ProcessorPayouts;

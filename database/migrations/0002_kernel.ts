@@ -17,7 +17,7 @@ export const kernel: Migration = {
     );
     create index audit_entries_row on audit_entries (table_name, row_id, id);
 
-    -- Arguments: the columns that are never written down (secrets, large contents).
+    -- Arguments: the column that names the row, then those that are never written down (secrets, large contents).
     create function write_audit() returns trigger language plpgsql security definer set search_path = public as $$
     declare
       before jsonb := case when tg_op = 'INSERT' then '{}'::jsonb else to_jsonb(old) end;
@@ -26,7 +26,7 @@ export const kernel: Migration = {
       field text;
     begin
       for field in select key from jsonb_object_keys(before || after) as key loop
-        if (before -> field) is distinct from (after -> field) and not (field = any (coalesce(tg_argv, '{}'))) then
+        if (before -> field) is distinct from (after -> field) and not (field = any (tg_argv[1:])) then
           changed := changed || jsonb_build_object(field, jsonb_build_array(before -> field, after -> field));
         end if;
       end loop;
@@ -34,7 +34,7 @@ export const kernel: Migration = {
       insert into audit_entries (table_name, row_id, action, person_id, purpose, customer_id, changed)
       values (
         tg_table_name,
-        coalesce((before || after) ->> 'id', ''),
+        (before || after) ->> tg_argv[0],
         lower(tg_op),
         caller_person(),
         caller_purpose(),

@@ -80,7 +80,7 @@ export const identity: Migration = {
       or id = (select caller_person())
       or (customer_id is null and (select caller_kind()) = 'staff')
     );
-    ${audited('people', ['password_hash'])}
+    ${audited('people', { secret: ['password_hash'] })}
 
     create table person_sites (
       person_id uuid not null,
@@ -92,7 +92,7 @@ export const identity: Migration = {
     );
     create index person_sites_site on person_sites (customer_id, site_id);
     ${customerRows('person_sites')}
-    ${audited('person_sites')}
+    ${audited('person_sites', { key: 'person_id' })}
 
     create table staff_customers (
       person_id uuid not null references people (id),
@@ -101,7 +101,7 @@ export const identity: Migration = {
     );
     create index staff_customers_customer on staff_customers (customer_id);
     ${customerRows('staff_customers')}
-    ${audited('staff_customers')}
+    ${audited('staff_customers', { key: 'person_id' })}
 
     -- One row per browser that is signed in; the tokens in its chain rotate.
     create table sign_in_sessions (

@@ -53,6 +53,8 @@ export const catalogue: Migration = {
       length_mm integer not null constraint specification_versions_length check (length_mm > 0),
       width_mm integer not null constraint specification_versions_width check (width_mm > 0),
       height_mm integer not null constraint specification_versions_height check (height_mm > 0),
+      -- How many ribs a rack keeps.
+      ribs integer constraint specification_versions_ribs check (ribs between 1 and 14),
       tolerance_mm integer not null constraint specification_versions_tolerance check (tolerance_mm >= 0),
       piece_nominal_grams bigint not null,
       piece_min_grams bigint not null,
@@ -116,7 +118,7 @@ export const catalogue: Migration = {
       reason text
     );
     create unique index specification_standings_one_current on specification_standings (specification_id) where standing = 'current';
-    ${audited('specification_standings')}
+    ${audited('specification_standings', { key: 'version_id' })}
 
     -- What can be found: one row per specification that has a current version, gone when that is withdrawn. Words of the
     -- version and of its place in the cut tree stand together, so that one trigram index serves every search.

@@ -44,8 +44,8 @@ export const ordering: Migration = {
     );
     ${customerRows('site_zones', 'customer_id', 'site_id')}
     ${audited('delivery_zones')}
-    ${audited('plant_closures')}
-    ${audited('site_zones')}
+    ${audited('plant_closures', { key: 'day' })}
+    ${audited('site_zones', { key: 'site_id' })}
 
     create sequence order_numbers start 1001;
     create table orders (

@@ -13,15 +13,22 @@ export const accounts: Migration = {
     create table payment_cards (
       id uuid primary key,
       customer_id uuid not null references customers (id),
+      -- What the browser was given for the card; once kept, the id under which the processor keeps it.
       processor_method_id text not null,
-      brand text not null,
-      last4 text not null,
-      expires text not null,
+      state text not null constraint payment_cards_state check (state in ('adding', 'kept', 'refused', 'removing', 'removed')),
+      brand text,
+      last4 text,
+      expires text,
+      decline_code text,
       created_at timestamptz not null,
-      removed_at timestamptz,
+      updated_at timestamptz not null,
       constraint payment_cards_of_customer unique (customer_id, id),
-      constraint payment_cards_method unique (processor_method_id)
+      constraint payment_cards_known check (
+        state not in ('kept', 'removing') or (brand is not null and last4 is not null and expires is not null)
+      )
     );
+    create index payment_cards_customer on payment_cards (customer_id, created_at) where state = 'kept';
+    create index payment_cards_unsettled on payment_cards (updated_at) where state in ('adding', 'removing');
     ${customerRows('payment_cards')}
 
     -- Written before the processor is called, with the key that every repeat of the call uses.
@@ -42,13 +49,19 @@ export const accounts: Migration = {
       processor_charge_id text constraint payments_charge unique,
       hold_ends_at timestamptz,
       decline_code text,
+      -- Where the holder confirms with the bank.
+      action_url text,
+      captured_at timestamptz,
       created_at timestamptz not null,
       updated_at timestamptz not null,
       constraint payments_of_customer unique (customer_id, id),
       constraint payments_order foreign key (customer_id, order_id) references orders (customer_id, id)
     );
     create index payments_order_id on payments (order_id);
-    create index payments_unsettled on payments (updated_at) where state in ('started', 'capturing', 'releasing');
+    create index payments_newest on payments (created_at desc, id desc);
+    create index payments_captured_at on payments (captured_at) where captured_at is not null;
+    create index payments_unsettled on payments (updated_at)
+      where state in ('started', 'needs-action', 'capturing', 'releasing');
     ${customerRows('payments')}
     ${audited('payments')}
 
@@ -79,6 +92,7 @@ export const accounts: Migration = {
       constraint invoices_total check (total_minor = net_minor + tax_minor)
     );
     create index invoices_newest on invoices (customer_id, number desc);
+    create index invoices_document on invoices (document_id);
     ${customerRows('invoices')}
     ${appendOnly('invoices')}
 
@@ -113,6 +127,7 @@ export const accounts: Migration = {
       source_key text not null constraint journal_entries_once unique,
       text text not null
     );
+    create index journal_entries_number on journal_entries (number);
     ${appendOnly('journal_entries')}
 
     create table journal_lines (
@@ -155,7 +170,14 @@ export const accounts: Migration = {
       received_at timestamptz not null,
       applied_at timestamptz
     );
-    create index processor_events_waiting on processor_events (received_at) where applied_at is null;
+    create index processor_events_received on processor_events (received_at);
+
+    -- What the processor said it holds for us, by currency, when it was last asked.
+    create table processor_balances (
+      currency text primary key,
+      amount_minor bigint not null,
+      read_at timestamptz not null
+    );
 
     create table processor_payouts (
       id text primary key,
@@ -182,6 +204,8 @@ export const accounts: Migration = {
     );
     create index processor_transactions_payout on processor_transactions (payout_id);
     create index processor_transactions_charge on processor_transactions (charge_id);
+    create index processor_transactions_created on processor_transactions (created_at);
+    create index processor_payouts_created on processor_payouts (created_at);
 
     create table bank_statements (
       id uuid primary key,
@@ -216,6 +240,7 @@ export const accounts: Migration = {
       'processor_events',
       'processor_payouts',
       'processor_transactions',
+      'processor_balances',
       'bank_statements',
       'bank_lines',
       'bank_matches',
@@ -228,6 +253,6 @@ export const accounts: Migration = {
     create policy staff_and_system on ${table} using ((select caller_kind()) in ('staff', 'system'));`,
       )
       .join('')}
-    ${audited('bank_matches')}
+    ${audited('bank_matches', { key: 'bank_line_id' })}
   `,
 };

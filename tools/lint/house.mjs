@@ -29,7 +29,12 @@ export function roomKind(storey, folder) {
  * Rooms with more than one way in: what an application's first load needs stands apart, since the bundler keeps whole
  * files together and one index would pull tables and forms into it.
  */
-const FURTHER_ENTRIES = { 'shared/ui': ['frame', 'table', 'forms'] };
+const FURTHER_ENTRIES = {
+  'shared/ui': ['frame', 'table', 'forms'],
+  'identity/data-access': ['session'],
+  'identity/contracts': ['session'],
+  'ordering/data-access': ['frame'],
+};
 
 export const furtherEntries = (storey, room) => FURTHER_ENTRIES[`${storey}/${room}`] ?? [];
 
@@ -81,6 +86,9 @@ const NEIGHBOURS = {
   tools: ['apps/api', 'seeds'],
 };
 
+/** The API's specs run against the stand-ins. */
+const SPEC_NEIGHBOURS = { 'apps/api': ['tools'] };
+
 /** Places whose specs may use the server's testing helpers though the place itself may not import the server. */
 const SPECS_WITH_SERVER_HELPERS = ['database'];
 
@@ -96,6 +104,8 @@ const PURE_PACKAGES = { util: ['luxon', 'uuid'], domain: [], contracts: ['zod'] 
 /** May code at `from` import the room `to`? Both are places as `boundaries.mjs` makes them. */
 export function mayReachRoom(from, to) {
   if (to.kind === 'contracts' && to.rank === 0 && USE_SHARED_CONTRACTS.includes(from.kind)) return true;
+  // A server's spec may call the endpoints of the storeys it stands on.
+  if (to.kind === 'contracts' && from.kind === 'server' && from.spec && to.rank < from.rank) return true;
   const reach = (ROOM_REACH[from.kind] ?? PLACE_REACH[from.kind])[to.kind];
   if (reach === undefined) {
     return from.spec && to.testing && to.kind === 'server' && SPECS_WITH_SERVER_HELPERS.includes(from.kind);
@@ -114,7 +124,10 @@ export function mayUseDatabase(from) {
 
 /** May code at `from` reach into the place `to` (no library) by a relative path? */
 export function mayReachPlace(from, to) {
-  return (NEIGHBOURS[from.kind] ?? []).includes(to.kind);
+  return (
+    (NEIGHBOURS[from.kind] ?? []).includes(to.kind) ||
+    (from.spec && (SPEC_NEIGHBOURS[from.kind] ?? []).includes(to.kind))
+  );
 }
 
 /** May code at `from` use a room's testing entry? Specs and testing folders may, and what exists for tests only. */

@@ -1,6 +1,9 @@
+// Texts are marked with $localize: it has to be there before anything that says something.
+import '@angular/localize/init';
 import { createServer as createHttpServer } from 'node:http';
 import { createLog, LiveHub, MovableClock, openDatabase, readConfig, systemClock } from '@seamwright/shared/server';
-import { buildHouse } from './house';
+import { authenticateBearer } from '@seamwright/identity/server';
+import { buildHouse, identityParts } from './house';
 import { createServer } from './server';
 import { untilStopped } from './until-stopped';
 
@@ -15,7 +18,13 @@ async function main(): Promise<void> {
   const app = createServer(
     config,
     house,
-    { database, clock, log, secureCookies: config.PUBLIC_ORIGIN.startsWith('https:'), authenticate: async () => null },
+    {
+      database,
+      clock,
+      log,
+      secureCookies: config.PUBLIC_ORIGIN.startsWith('https:'),
+      authenticate: authenticateBearer(identityParts(config)),
+    },
     live,
   );
   const server = createHttpServer(app);

@@ -1,3 +1,5 @@
+// Texts are marked with $localize: it has to be there before anything that says something.
+import '@angular/localize/init';
 import { createLog, MovableClock, openDatabase, readConfig, startWorker, systemClock } from '@seamwright/shared/server';
 import { buildHouse } from './house';
 import { untilStopped } from './until-stopped';

@@ -1,5 +1,5 @@
 import { registerLocaleData } from '@angular/common';
-import { provideHttpClient, withFetch } from '@angular/common/http';
+import { provideHttpClient } from '@angular/common/http';
 import localeEnGb from '@angular/common/locales/en-GB';
 import {
   type ApplicationConfig,
@@ -10,6 +10,7 @@ import {
 import { provideRouter, withComponentInputBinding, withInMemoryScrolling } from '@angular/router';
 import { provideEffects } from '@ngrx/effects';
 import { provideStore } from '@ngrx/store';
+import { provideIdentity } from '@seamwright/identity/data-access/session';
 import { provideHeadingFocus, providePageTitle } from '@seamwright/shared/ui/frame';
 import { routes } from './app.routes';
 
@@ -26,9 +27,11 @@ export const appConfig: ApplicationConfig = {
       withInMemoryScrolling({ scrollPositionRestoration: 'enabled', anchorScrolling: 'enabled' }),
     ),
     provideHeadingFocus(),
-    providePageTitle('Seamwright desk'),
-    provideHttpClient(withFetch()),
+    providePageTitle($localize`:@@admin.name:Seamwright desk`),
+    // Not by fetch: uploads tell their progress.
+    provideHttpClient(),
     provideStore(),
     provideEffects(),
+    provideIdentity('admin'),
   ],
 };

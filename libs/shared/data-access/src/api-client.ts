@@ -1,6 +1,26 @@
-import { HttpClient, HttpErrorResponse, HttpHeaders, HttpParams, type HttpResponse } from '@angular/common/http';
+import {
+  HttpClient,
+  HttpErrorResponse,
+  HttpEventType,
+  HttpHeaders,
+  HttpParams,
+  HttpRequest,
+  type HttpResponse,
+} from '@angular/common/http';
 import { inject, Injectable } from '@angular/core';
-import { catchError, from, map, switchMap, throwError, type Observable } from 'rxjs';
+import {
+  catchError,
+  filter,
+  finalize,
+  from,
+  map,
+  merge,
+  Subject,
+  switchMap,
+  tap,
+  throwError,
+  type Observable,
+} from 'rxjs';
 import type { Answer, AnyEndpoint, CallInput } from '@seamwright/shared/contracts';
 import { newId } from '@seamwright/shared/util';
 import { ACCESS_TOKEN_SOURCE } from './access-token';
@@ -9,6 +29,12 @@ import { ApiProblem, asProblem } from './api-problem';
 export interface FileDownload {
   readonly fileName: string;
   readonly blob: Blob;
+}
+
+/** How far an upload is; with its answer at the end. */
+export interface UploadStep<E extends AnyEndpoint> {
+  readonly percent: number;
+  readonly answer: Answer<E> | null;
 }
 
 interface Sent {
@@ -38,10 +64,25 @@ export class ApiClient {
     );
   }
 
-  #send(endpoint: AnyEndpoint, input: Sent, kind: 'json' | 'blob'): Observable<HttpResponse<unknown>> {
+  /** Sends a file, telling the percentage that is on its way before the answer. */
+  upload<E extends AnyEndpoint>(endpoint: E, input: CallInput<E>): Observable<UploadStep<E>> {
+    const progress = new Subject<number>();
+    const answer = this.#send(endpoint, input as Sent, 'json', progress).pipe(
+      map((response): UploadStep<E> => ({ percent: 100, answer: response.body as Answer<E> })),
+      finalize(() => progress.complete()),
+    );
+    return merge(progress.pipe(map((percent): UploadStep<E> => ({ percent, answer: null }))), answer);
+  }
+
+  #send(
+    endpoint: AnyEndpoint,
+    input: Sent,
+    kind: 'json' | 'blob',
+    progress?: Subject<number>,
+  ): Observable<HttpResponse<unknown>> {
     // One key for the deed: a renewed token repeats it with the same one.
     const key = endpoint.idempotent ? (input.idempotencyKey ?? newId()) : null;
-    const once = (token: string | null) => this.#request(endpoint, input, kind, key, token);
+    const once = (token: string | null) => this.#request(endpoint, input, kind, key, token, progress);
     return once(this.#tokens?.current() ?? null).pipe(
       catchError((error: unknown) => {
         const refused = error instanceof HttpErrorResponse && error.status === 401 && endpoint.access.who === 'roles';
@@ -60,21 +101,30 @@ export class ApiClient {
     kind: 'json' | 'blob',
     key: string | null,
     token: string | null,
+    progress?: Subject<number>,
   ): Observable<HttpResponse<unknown>> {
     let headers = new HttpHeaders();
     if (token) headers = headers.set('authorization', `Bearer ${token}`);
     if (key) headers = headers.set('idempotency-key', key);
     if (input.ifMatch !== undefined) headers = headers.set('if-match', `"${input.ifMatch}"`);
-    const options = {
-      headers,
-      params: queryOf(input.query),
-      body: bodyOf(endpoint, input),
-      observe: 'response' as const,
-    };
-    const address = addressOf(endpoint, input.params);
-    return kind === 'blob'
-      ? this.#http.request(endpoint.method, address, { ...options, responseType: 'blob' })
-      : this.#http.request(endpoint.method, address, { ...options, responseType: 'json' });
+    const request = new HttpRequest<unknown>(
+      endpoint.method,
+      addressOf(endpoint, input.params),
+      bodyOf(endpoint, input),
+      {
+        headers,
+        params: queryOf(input.query),
+        responseType: kind,
+        reportProgress: progress !== undefined,
+      },
+    );
+    return this.#http.request<unknown>(request).pipe(
+      tap((event) => {
+        if (event.type === HttpEventType.UploadProgress && event.total)
+          progress?.next(Math.floor((event.loaded * 100) / event.total));
+      }),
+      filter((event): event is HttpResponse<unknown> => event.type === HttpEventType.Response),
+    );
   }
 }
 

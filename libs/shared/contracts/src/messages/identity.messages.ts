@@ -13,7 +13,8 @@ export const identityMessages = {
     $localize`This link was used already, was replaced by a newer one, or is too old. Ask for a new one.`,
   'password-short': (p) => $localize`Use at least ${p['least']}:least: characters. A short sentence is easy to keep.`,
   'password-long': (p) => $localize`Use at most ${p['most']}:most: characters.`,
-  'password-is-email': () => $localize`Your e-mail address is the first thing others would try. Choose another password.`,
+  'password-is-email': () =>
+    $localize`Your e-mail address is the first thing others would try. Choose another password.`,
   'password-common': () => $localize`This is one of the passwords that are tried first everywhere. Choose another.`,
   'password-wrong': () => $localize`This is not your present password.`,
   'email-taken': () => $localize`Somebody is here under this e-mail address already.`,

@@ -16,6 +16,8 @@ const CODES: Readonly<Record<string, string>> = {
   '23001': 'not-changeable', // restrict_violation: append-only
   '23514': 'invalid', // check_violation
   '22003': 'too-big', // numeric_value_out_of_range
+  '22021': 'invalid', // character_not_in_repertoire: a NUL in a text
+  '22P05': 'invalid', // untranslatable_character: a NUL in JSON
 };
 
 /** Turns a broken database rule into a refusal, with the constraint's name among its parameters; null for any other error. */

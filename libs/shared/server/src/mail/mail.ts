@@ -101,7 +101,7 @@ export function mailSubscriber(mailer: Mailer): Subscriber {
       });
       const sentAt = await clock.now();
       await inTransaction(database, system('job'), (tx) =>
-        tx.updateTable('mails').set({ sentAt }).where('id', '=', mail.id).execute(),
+        tx.updateTable('mails').set({ sentAt, bodyText: '' }).where('id', '=', mail.id).execute(),
       );
     },
   };

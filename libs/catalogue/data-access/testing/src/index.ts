@@ -1,0 +1,1 @@
+export { aPublicSpecification } from './a-public-specification';

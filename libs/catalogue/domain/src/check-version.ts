@@ -1,0 +1,94 @@
+import { isGtin, type Refusal } from '@seamwright/shared/util';
+import { choiceKey } from './choice-key';
+import { brokenRule, withDefaults } from './choice-rules';
+import type { Choice, ChoiceRule } from './choices';
+import type { VersionContent } from './specification-version';
+
+/**
+ * Everything that is wrong with what an author wrote, each with a pointer to its field; empty when it may be sent to
+ * review. Codes begin with `version-`.
+ */
+export function faultsOfVersion(content: VersionContent): Refusal[] {
+  return [
+    ...faultsOfNumbers(content),
+    ...faultsOfText(content),
+    ...faultsOfWeights(content),
+    ...content.choices.flatMap((choice, at) => faultsOfChoice(choice, `/choices/${at}`)),
+    ...faultsOfRules(content.choices, content.choiceRules),
+  ];
+}
+
+const fault = (code: string, pointer: string, params: Refusal['params'] = {}): Refusal => ({ code, params, pointer });
+
+function faultsOfNumbers(content: VersionContent): Refusal[] {
+  const faults: Refusal[] = [];
+  const outputs = content.yieldPpm + content.otherOutputs.reduce((sum, { yieldPpm }) => sum + yieldPpm, 0);
+  if (outputs > 1_000_000) {
+    faults.push(fault('version-yields-over-one', '/yieldPpm', { percent: `${Math.ceil(outputs / 10_000)} %` }));
+  }
+  if (content.fatCoverMm < 0 || content.fatCoverMm > 60) faults.push(fault('version-fat-cover', '/fatCoverMm'));
+  if (Math.min(content.lengthMm, content.widthMm, content.heightMm) < 1) {
+    faults.push(fault('version-dimensions', '/lengthMm'));
+  }
+  if (content.minLifeAtDeliveryDays > content.shelfLifeDays) {
+    faults.push(fault('version-life', '/minLifeAtDeliveryDays'));
+  }
+  if (content.storageMinC > content.storageMaxC) faults.push(fault('version-storage', '/storageMinC'));
+  return faults;
+}
+
+function faultsOfText({ steps, gtin }: VersionContent): Refusal[] {
+  const empty = steps.flatMap(({ text }, at) =>
+    text.trim() === '' ? [fault('version-step-empty', `/steps/${at}`)] : [],
+  );
+  return gtin === null || isGtin(gtin) ? empty : [...empty, fault('version-gtin', '/gtin')];
+}
+
+/** The version's own weights and those that each single value makes of them. */
+function faultsOfWeights(content: VersionContent): Refusal[] {
+  const own = isOrdered(content) ? [] : [fault('version-weights-order', '/pieceNominalGrams')];
+  const changed = content.choices.flatMap(({ values }, at) =>
+    values.flatMap(({ changes }, valueAt) =>
+      isOrdered({ ...content, ...changes })
+        ? []
+        : [fault('version-weights-order', `/choices/${at}/values/${valueAt}/changes`)],
+    ),
+  );
+  return own.length > 0 ? own : changed;
+}
+
+interface Weights {
+  readonly pieceMinGrams: number;
+  readonly pieceNominalGrams: number;
+  readonly pieceMaxGrams: number;
+}
+
+const isOrdered = ({ pieceMinGrams, pieceNominalGrams, pieceMaxGrams }: Weights): boolean =>
+  pieceMinGrams > 0 && pieceMinGrams <= pieceNominalGrams && pieceNominalGrams <= pieceMaxGrams;
+
+/** Keys and values go into the canonical key, so its own signs can't be among them. */
+const SLUG = /^[a-z0-9][a-z0-9-]*$/;
+
+function faultsOfChoice({ key, values, defaultValue }: Choice, pointer: string): Refusal[] {
+  const words = [key, ...values.map(({ value }) => value)];
+  const twice = values.find(({ value }, at) => values.findIndex((other) => other.value === value) < at);
+  return [
+    ...words.filter((word) => !SLUG.test(word)).map((value) => fault('version-choice-form', pointer, { value })),
+    ...(twice ? [fault('version-choice-twice', pointer, { value: twice.value })] : []),
+    ...(values.some(({ value }) => value === defaultValue)
+      ? []
+      : [fault('version-default-unknown', pointer, { choice: key })]),
+  ];
+}
+
+function faultsOfRules(choices: readonly Choice[], rules: readonly ChoiceRule[]): Refusal[] {
+  const known = new Set(choices.flatMap(({ key, values }) => values.map(({ value }) => choiceKey({ [key]: value }))));
+  const unknown = rules.flatMap(({ when, forbids }, at) =>
+    [...Object.entries(when), [forbids.choice, forbids.value] as const]
+      .map(([key, value]) => choiceKey({ [key]: value }))
+      .filter((pair) => !known.has(pair))
+      .map((value) => fault('version-rule-unknown', `/choiceRules/${at}`, { value })),
+  );
+  const broken = brokenRule(rules, withDefaults(choices, {}));
+  return broken ? [...unknown, fault('version-defaults-impossible', '/choices', { reason: broken.reason })] : unknown;
+}

@@ -1,0 +1,2 @@
+export { aChoice, aValue } from './a-choice';
+export { aContent, aVersion } from './a-version';

@@ -1,0 +1,82 @@
+import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
+import { RouterLink } from '@angular/router';
+import type { CatalogueCounts, CatalogueFilters } from '@seamwright/catalogue/data-access';
+import { boneStateName, speciesName } from '@seamwright/catalogue/ui';
+import { Icon } from '@seamwright/shared/ui';
+
+interface FilterValue {
+  readonly name: string;
+  readonly count: number;
+  readonly on: boolean;
+  /** What the address says after it is pressed: set, or taken off again. */
+  readonly query: Readonly<Record<string, string | null>>;
+}
+
+/** What the catalogue can be narrowed to, each with how many it would leave. Pressed again, a filter is taken off. */
+@Component({
+  selector: 'sw-catalogue-filter-panel',
+  imports: [Icon, RouterLink],
+  template: `
+    @for (group of groups(); track group.name) {
+      <section>
+        <h2>{{ group.name }}</h2>
+        <ul>
+          @for (value of group.values; track value.name) {
+            <li>
+              <a
+                [routerLink]="[]"
+                [queryParams]="value.query"
+                queryParamsHandling="merge"
+                [attr.aria-current]="value.on ? 'true' : null"
+              >
+                @if (value.on) {
+                  <sw-icon name="check" [size]="16" />
+                }
+                <span>{{ value.name }}</span>
+                <span class="count">{{ value.count }}</span>
+              </a>
+            </li>
+          }
+        </ul>
+      </section>
+    }
+  `,
+  styleUrl: './catalogue-filter-panel.scss',
+  host: { role: 'navigation', '[attr.aria-label]': 'label' },
+  changeDetection: ChangeDetectionStrategy.OnPush,
+})
+export class CatalogueFilterPanel {
+  readonly filters = input.required<CatalogueFilters>();
+  readonly counts = input.required<CatalogueCounts>();
+
+  protected readonly label = $localize`:@@catalogue.filter.label:Narrow the catalogue`;
+  protected readonly groups = computed(() => {
+    const { species, primal, boneState } = this.filters();
+    const counts = this.counts();
+    return [
+      {
+        name: $localize`:@@catalogue.filter.species:Species`,
+        values: counts.species.map(({ species: each, count }): FilterValue => {
+          const on = each === species;
+          // A primal belongs to one species, so a new species takes it off.
+          return { name: speciesName(each), count, on, query: { species: on ? null : each, primal: null } };
+        }),
+      },
+      {
+        name: $localize`:@@catalogue.filter.primal:Primal`,
+        values: counts.primals.map(({ id, name, species: of, count }): FilterValue => {
+          const on = id === primal;
+          const full = species ? name : `${speciesName(of)} – ${name}`;
+          return { name: full, count, on, query: { primal: on ? null : id } };
+        }),
+      },
+      {
+        name: $localize`:@@catalogue.filter.bone:Bone`,
+        values: counts.boneStates.map(({ boneState: each, count }): FilterValue => {
+          const on = each === boneState;
+          return { name: boneStateName(each), count, on, query: { bone: on ? null : each } };
+        }),
+      },
+    ].filter(({ values }) => values.length > 0);
+  });
+}

@@ -1,0 +1,15 @@
+export {
+  boneStateName,
+  finishName,
+  outputKindName,
+  packTypeName,
+  pieceName,
+  speciesName,
+  stageName,
+  stationName,
+  temperatureName,
+} from './catalogue-words';
+export { SpecChoices, type ValueChosen } from './choices/spec-choices';
+export { SpecDrawing } from './drawing/spec-drawing';
+export { SpecThumb } from './drawing/spec-thumb';
+export { weightText } from './weight-words';

@@ -1,0 +1,12 @@
+export { normaliseEmail } from './email';
+export { type Address, type Customer, CUSTOMER_KINDS, type CustomerKind, TERMS_FROM, type TermsFrom } from './customer';
+export { customersOf, siteRule, type Reach } from './reach';
+export { LOCK_OUT_WINDOW_MINUTES, waitBeforeSignIn } from './lock-out';
+export { checkPassword, MAX_PASSWORD_LENGTH, MIN_PASSWORD_LENGTH } from './password';
+export { checkStanding, type Standing } from './standing';
+export type { Person, PersonState } from './person';
+export { applicationOf, isBuyer, type Application, type BuyerRole, type DeskRole, type StaffRole } from './role';
+export { mayLookAfter, type Steward } from './stewardship';
+export { rotationOf, REFRESH_GRACE_SECONDS, type PresentedToken, type Rotation } from './rotation';
+export { sessionEnd } from './session';
+export type { Site } from './site';

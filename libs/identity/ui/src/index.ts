@@ -1,0 +1,11 @@
+export { customerKindName, customerKindNames, termsFromName, termsFromNames } from './customer-words';
+export { describeDevice } from './device-words';
+export { NewerState, type NewerValue } from './newer-state';
+export { newPassword } from './new-password';
+export { PasswordField } from './password-field';
+export { PersonForm, type PersonFormValue } from './person-form';
+export { personStateName, personStateTone, roleName, roleNames } from './person-words';
+export { PeopleBoard, type PeopleDesk } from './people-board';
+export { SitesBoard, type SitesDesk } from './sites-board';
+export { SiteForm, type SiteFormValue } from './site-form';
+export { differences } from './differences';

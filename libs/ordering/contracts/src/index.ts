@@ -1,0 +1,35 @@
+export { listDeliveryDays, type DeliveryDaysAnswer } from './delivery-days.endpoints';
+export {
+  addZone,
+  changeZone,
+  getCalendar,
+  listSiteZones,
+  removeClosure,
+  setClosure,
+  setSiteZone,
+  type ClosureWire,
+  type DeliveryZoneWire,
+  type SiteZoneWire,
+} from './calendar.endpoints';
+export {
+  cancelOrder,
+  getOrder,
+  listOrders,
+  ORDER_FILTERS,
+  placeOrder,
+  type NewOrderWire,
+  type OrderDetail,
+  type OrderLineWire,
+  type OrderListItem,
+} from './orders.endpoints';
+export {
+  getImportTemplate,
+  getOrderImport,
+  MOST_IMPORT_BYTES,
+  takeOrders,
+  uploadOrders,
+  WORKBOOK_MEDIA_TYPE,
+  type ImportFaultWire,
+  type ImportOrderWire,
+  type OrderImportWire,
+} from './order-imports.endpoints';

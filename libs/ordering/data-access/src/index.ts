@@ -1,0 +1,14 @@
+export type { BasketDetails, BasketDraft, BasketLine } from './basket/basket-draft';
+export { BasketActions } from './basket/basket.actions';
+export { basketFeature } from './basket/basket.feature';
+export { provideBasket } from './basket/provide-basket';
+export { BasketPageActions, CheckoutApiActions } from './checkout/checkout.actions';
+export { checkoutEffects } from './checkout/checkout.effects';
+export { checkoutFeature, type CheckedLine } from './checkout/checkout.feature';
+export { DeliveryCalendar, type CalendarAnswer, type ZoneFields } from './delivery-calendar';
+export { DeliveryDays, minutesLeft, type DaysQuestion, type DeliveryDaysNow } from './delivery-days';
+export { OrderImports } from './order-imports';
+export { OrderPlacing } from './order-placing';
+export { OrderListPageActions, OrderPageActions, OrdersApiActions, type OrderSearch } from './orders/orders.actions';
+export { ordersEffects } from './orders/orders.effects';
+export { ordersFeature } from './orders/orders.feature';

@@ -1,0 +1,1 @@
+export { basketRoutes } from './basket.routes';

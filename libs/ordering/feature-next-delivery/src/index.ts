@@ -1,0 +1,1 @@
+export { NextDelivery } from './next-delivery';

@@ -1,0 +1,1 @@
+export { orderDeskRoutes } from './order-desk.routes';

@@ -1,0 +1,1 @@
+export { orderImportRoutes } from './order-import.routes';

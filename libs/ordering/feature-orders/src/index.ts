@@ -1,0 +1,1 @@
+export { ordersRoutes } from './orders.routes';

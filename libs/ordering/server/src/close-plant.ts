@@ -1,0 +1,31 @@
+import type { ClosureWire } from '@seamwright/ordering/contracts';
+import { conflict, notFound, type Tx } from '@seamwright/shared/server';
+import { plantToday, RefusalError, type PlantDate } from '@seamwright/shared/util';
+import { countOrdersOfDay } from './orders.repository';
+
+interface Closing {
+  readonly now: Date;
+  readonly timeZone: string;
+  readonly day: string;
+  readonly reason: string;
+}
+
+/** Closes the plant for a day. Refuses `day-past`, and `closure-has-orders` (count): those are to be moved first. */
+export async function closePlant(tx: Tx, { now, timeZone, day, reason }: Closing): Promise<ClosureWire> {
+  if (day < plantToday(now, timeZone)) throw new RefusalError({ code: 'day-past', params: { day }, pointer: '/day' });
+  const count = await countOrdersOfDay(tx, day as PlantDate);
+  if (count > 0) throw conflict('closure-has-orders', { day, count });
+  await tx
+    .insertInto('plantClosures')
+    .values({ day, reason })
+    .onConflict((conflicting) => conflicting.column('day').doUpdateSet({ reason }))
+    .execute();
+  return { day, reason };
+}
+
+/** Opens the plant again. Throws `not-found` when it was not closed. */
+export async function openPlant(tx: Tx, day: string): Promise<undefined> {
+  const { numDeletedRows } = await tx.deleteFrom('plantClosures').where('day', '=', day).executeTakeFirst();
+  if (numDeletedRows === 0n) throw notFound();
+  return undefined;
+}

@@ -1,0 +1,23 @@
+import { openTestHouse, type TestHouse } from '@seamwright/shared/server/testing';
+import { orderingImplementations, orderingSubscribers, type DayPort } from '../../src';
+import { FakeCards } from './fake-cards';
+import { addTestTrade, type TestTrade } from './test-trade';
+
+export interface OrderingHouse extends TestHouse, TestTrade {
+  readonly cards: FakeCards;
+  /** Days that take no more orders. */
+  readonly closedDays: Set<string>;
+}
+
+/** A test house with customers, specifications, prices and a card keeper that stands in for the real one. */
+export async function openOrderingHouse(): Promise<OrderingHouse> {
+  const closedDays = new Set<string>();
+  const days: DayPort = { isClosed: async (_tx, day) => closedDays.has(day) };
+  const cards = new FakeCards();
+  const house = await openTestHouse({
+    implementations: ({ clock }) => orderingImplementations({ timeZone: 'Europe/London', cards, days, clock }),
+    subscribers: orderingSubscribers({ cards }),
+  });
+  const trade = await addTestTrade(house.database, new Date('2026-11-02T09:00:00Z'));
+  return { ...house, ...trade, cards, closedDays };
+}

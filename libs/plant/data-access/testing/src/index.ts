@@ -1,0 +1,1 @@
+export { aDay, aPackingLine, aPackingOrder, somePapers } from './a-day';

@@ -1,0 +1,1 @@
+export { DELIVERY_DAY, openTestPlant, TIME_ZONE, type TestPlant } from './test-plant';

@@ -1,0 +1,1 @@
+export { priceListsRoutes } from './price-lists.routes';

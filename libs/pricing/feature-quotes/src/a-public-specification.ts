@@ -1,0 +1,61 @@
+import type { PublicSpecification } from '@seamwright/catalogue/contracts';
+
+/** A boneless shoulder of 2 kg (1.9 to 2.1), four to a case, with a trim and a finish to choose. */
+export function aPublicSpecification(of: Partial<PublicSpecification> = {}): PublicSpecification {
+  const value = (name: string, priceChangeMinorPerKg = 0) => ({
+    value: name,
+    label: name,
+    priceChangeMinorPerKg,
+    leadDays: 0,
+  });
+  return {
+    specificationId: '00000000-0000-7000-8000-0000000000a0',
+    versionId: '00000000-0000-7000-8000-0000000000a1',
+    code: 'LM-901',
+    version: 1,
+    name: 'Boneless shoulder',
+    summary: 'Shoulder, boned.',
+    species: 'lamb',
+    path: [],
+    uneceItem: null,
+    uneceItemSeen: false,
+    fatCode: null,
+    cuttingLines: '',
+    boneState: 'boneless',
+    fatCoverMm: 6,
+    removed: [],
+    finish: 'plain',
+    drawingKind: 'joint',
+    ribs: null,
+    pieceKind: 'joint',
+    lengthMm: 200,
+    widthMm: 120,
+    heightMm: 90,
+    toleranceMm: 10,
+    pieceNominalGrams: 2_000,
+    pieceMinGrams: 1_900,
+    pieceMaxGrams: 2_100,
+    piecesPerPack: 1,
+    packsPerCase: 4,
+    packType: 'vacuum',
+    gtin: null,
+    temperatureState: 'chilled',
+    storageMinC: 0,
+    storageMaxC: 4,
+    shelfLifeDays: 14,
+    minLifeAtDeliveryDays: 8,
+    ageing: null,
+    allergens: [],
+    mayContain: [],
+    cookingLossPpm: 250_000,
+    steps: [],
+    choices: [
+      { key: 'trim', label: 'Trim level', unit: 'mm fat', values: [value('6'), value('0', 45)], defaultValue: '6' },
+      { key: 'finish', label: 'Finish', values: [value('plain'), value('tied', 20)], defaultValue: 'plain' },
+    ],
+    choiceRules: [
+      { when: { trim: '0' }, forbids: { choice: 'finish', value: 'tied' }, reason: 'there is nothing to tie' },
+    ],
+    ...of,
+  };
+}

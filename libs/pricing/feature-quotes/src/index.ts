@@ -1,0 +1,1 @@
+export { quotesRoutes } from './quotes.routes';

@@ -1,0 +1,1 @@
+export { receivedQuotesRoutes } from './received-quotes.routes';

@@ -1,0 +1,1 @@
+export { addTestMarket, type TestMarket } from './test-market';

@@ -1,0 +1,1 @@
+export { getLot, holdLot, listLotNodes, listLots, receiveLot, releaseLot, type LotWire } from './lots.endpoints';

@@ -1,0 +1,1 @@
+export { aLotWire } from './a-lot-wire';

@@ -1,0 +1,2 @@
+export { seedCatalogue } from './seed-catalogue';
+export { SPECIFICATIONS } from './specifications';

@@ -1,0 +1,1 @@
+export { seedPricing } from './seed-pricing';
