@@ -10,7 +10,7 @@ import { Desk } from './desk';
 import { at, startOfHistory } from './history/history-days';
 import { makeHistory } from './history/make-history';
 import { seedCalendar } from './history/seed-calendar';
-import { noTill } from './money/till';
+import { openCardTill } from './money/card-till';
 import { seedPeople } from './people/seed-people';
 import { seedPricing } from './pricing';
 
@@ -30,7 +30,7 @@ export async function loadDemo({ config, database, log, anchor, say }: Loading):
   const now = at(start, '05:00');
   const clock = new SetClock(now);
   const jobs = { database, clock, log };
-  const house = buildHouse({ config, database, clock });
+  const house = buildHouse({ config, database, clock, log });
   const desk = new Desk({ ...house, jobs, clock });
 
   const people = await inTransaction(database, system('seed'), (tx) => seedPeople(tx, now, config.ARGON2_MEMORY_KIB));
@@ -47,10 +47,11 @@ export async function loadDemo({ config, database, log, anchor, say }: Loading):
     people,
     callers,
     nodes: await primalsByKey(database),
-    till: noTill,
+    till: await openCardTill({ origin: processorOf(config), desk, callers }, now),
     anchor,
     say,
   });
+  house.close();
 }
 
 /** The primals by the keys that the seeds use: species and name. */
@@ -62,3 +63,7 @@ async function primalsByKey(database: Database): Promise<ReadonlyMap<string, Cut
     ),
   );
 }
+
+/** Where the card processor's stand-in is reached. */
+const processorOf = ({ STRIPE_PROTOCOL, STRIPE_HOST, STRIPE_PORT }: Config): string =>
+  `${STRIPE_PROTOCOL}://${STRIPE_HOST}:${STRIPE_PORT}`;

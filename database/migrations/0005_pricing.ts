@@ -62,7 +62,7 @@ export const pricing: Migration = {
       )
     );
     create index price_lines_lookup on price_lines (specification_id, price_list_id);
-    ${readAndWritten('price_lines', 'price_list_id in (select id from price_lists)', ownList)}
+    ${readAndWritten('price_lines', 'exists (select from price_lists l where l.id = price_list_id)', ownList)}
     ${audited('price_lines')}
 
     create table price_breaks (
@@ -73,7 +73,7 @@ export const pricing: Migration = {
     );
     ${readAndWritten(
       'price_breaks',
-      'price_line_id in (select id from price_lines)',
+      'exists (select from price_lines l where l.id = price_line_id)',
       `price_line_id in (select id from price_lines where ${ownList})`,
     )}
 

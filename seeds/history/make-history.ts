@@ -25,7 +25,7 @@ interface History {
   readonly say: (line: string) => void;
 }
 
-const ORDERING_PERCENT = 45;
+const ORDERING_PERCENT = 32;
 const SATURDAY = 6;
 
 /**
@@ -39,8 +39,8 @@ export async function makeHistory(history: History): Promise<void> {
     await moveTo(history, day, '05:30');
     await receiveWeek(desk, planner, nodes, day, chance);
     if (day === anchor) break;
-    for (const delivery of deliveriesCutOn(day)) await playDay(history, day, delivery);
-    await history.till.endOfDay(day);
+    await playDay(history, day, deliveriesCutOn(day));
+    await history.till.endOfDay(day, addDays(day, 7) > anchor);
   }
   await moveTo(history, anchor, '09:00');
   for (const delivery of deliveriesCutOn(anchor)) await takeOrders(history, delivery, 3);
@@ -54,24 +54,33 @@ function deliveriesCutOn(day: PlantDate): PlantDate[] {
   return weekdayOf(next) === SATURDAY ? [next, addDays(day, 3)] : [next];
 }
 
-async function playDay(history: History, day: PlantDate, delivery: PlantDate): Promise<void> {
+/** Orders come in before noon, the days are closed at cut-off and sent to the floor, and packed by the evening. */
+async function playDay(history: History, day: PlantDate, deliveries: readonly PlantDate[]): Promise<void> {
   const { desk, chance, anchor } = history;
   const planner = person(history, 'petra');
+  const read = (deliveryDay: PlantDate) => desk.call(planner, getCuttingDay, { params: { deliveryDay } });
+  const move = async (deliveryDay: PlantDate, endpoint: typeof closeCuttingDay) =>
+    desk.call(planner, endpoint, { params: { deliveryDay }, ifMatch: (await read(deliveryDay)).rowVersion });
+
   await moveTo(history, day, '10:15');
-  const count = await takeOrders(history, delivery);
-  if (count === 0) return;
+  const ordered: [PlantDate, number][] = [];
+  for (const delivery of deliveries) {
+    const count = await takeOrders(history, delivery);
+    if (count > 0) ordered.push([delivery, count]);
+  }
   await moveTo(history, day, '16:05');
-  const read = () => desk.call(planner, getCuttingDay, { params: { deliveryDay: delivery } });
-  const move = async (endpoint: typeof closeCuttingDay | typeof releaseCuttingDay | typeof finishCuttingDay) =>
-    desk.call(planner, endpoint, { params: { deliveryDay: delivery }, ifMatch: (await read()).rowVersion });
-  await move(closeCuttingDay);
-  await move(releaseCuttingDay);
+  for (const [delivery] of ordered) {
+    await move(delivery, closeCuttingDay);
+    await move(delivery, releaseCuttingDay);
+  }
   await moveTo(history, day, '18:40');
-  const onTheFloor = delivery === anchor;
-  await packDay(desk, person(history, 'femi'), chance, { deliveryDay: delivery, leave: onTheFloor ? 1 : 0 });
-  await desk.settle();
-  if (!onTheFloor) await move(finishCuttingDay);
-  history.say(`${delivery}: ${count} orders cut, packed and invoiced`);
+  for (const [delivery, count] of ordered) {
+    const onTheFloor = delivery === anchor;
+    await packDay(desk, person(history, 'femi'), chance, { deliveryDay: delivery, leave: onTheFloor ? 1 : 0 });
+    await desk.settle();
+    if (!onTheFloor) await move(delivery, finishCuttingDay);
+    history.say(`${delivery}: ${count} orders cut, packed and invoiced`);
+  }
 }
 
 /** Some of the customers whose zone is delivered to order as usual, `least` of them at any rate; gives how many did. */

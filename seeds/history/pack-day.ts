@@ -5,7 +5,7 @@ import type { Chance } from '../chance';
 import type { Desk } from '../desk';
 
 /** Big orders go out in few packs: the demo needs weights, not thousands of rows. */
-const MOST_PACKS_A_LINE = 4;
+const MOST_PACKS_A_LINE = 2;
 
 interface Packing {
   readonly deliveryDay: PlantDate;

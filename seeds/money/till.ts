@@ -4,15 +4,8 @@ import type { PlantDate } from '@seamwright/shared/util';
 export interface Till {
   /** The processor's clock goes along with the desk's. */
   moveTo(instant: Date): Promise<void>;
-  /** The id of the card that a customer keeps, adding one when there is none; null where nobody takes cards. */
-  cardOf(customerKey: string): Promise<string | null>;
-  /** Payouts, and the bank's statement at the end of a week. */
-  endOfDay(day: PlantDate): Promise<void>;
+  /** The id of the card that a customer keeps, adding one when there is none. */
+  cardOf(customerKey: string): Promise<string>;
+  /** What the processor and our books do overnight. */
+  endOfDay(day: PlantDate, newest: boolean): Promise<void>;
 }
-
-/** A desk that takes no cards. */
-export const noTill: Till = {
-  moveTo: async () => undefined,
-  cardOf: async () => null,
-  endOfDay: async () => undefined,
-};

@@ -1,5 +1,5 @@
 import { Router, type Response } from 'express';
-import { z } from 'zod';
+import * as z from 'zod';
 import type { Mailbox } from './mailbox';
 import type { MailAttachment } from './message';
 import { toDetail, toSummary } from './message-json';

@@ -2,6 +2,16 @@
 import { join } from 'node:path';
 import { freePort } from './ports.mjs';
 
+/** The demo's firm, which does not exist, and the tariff of the card processor's stand-in. */
+const demoSeller = {
+  SELLER_NAME: 'Withenbeck Meats',
+  SELLER_ADDRESS: 'Lower Tannery|Withenbeck|WB1 4MW',
+  SELLER_VAT_NUMBER: 'GB 000 0000 00',
+  SELLER_BANK_DETAILS: 'Demo bank, sort code 00-00-00, account 00000000',
+  CARD_FEE_PPM: '15000',
+  CARD_FEE_FIXED_MINOR: '20',
+};
+
 /** Where the card processor's events are received. */
 const webhookPath = '/api/webhooks/stripe';
 
@@ -53,6 +63,7 @@ export function environments({ ports, secrets, database, folder, statics }) {
     STRIPE_PORT: String(ports.stripe),
     STRIPE_PROTOCOL: 'http',
     STRIPE_WEBHOOK_SECRET: secrets.stripeWebhookSecret,
+    ...demoSeller,
     SMTP_URL: `smtp://127.0.0.1:${ports.smtp}`,
     PUBLIC_ORIGIN: addressesOf(ports).origin,
     SEAMWRIGHT_MODE: 'demo',

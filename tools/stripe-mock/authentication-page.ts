@@ -1,5 +1,5 @@
 import express, { Router, type Response } from 'express';
-import { z } from 'zod';
+import * as z from 'zod';
 import { authenticate } from './control';
 import { minorUnits } from './minor-units';
 import type { PaymentIntent } from './payment-intents';

@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import * as z from 'zod';
 import type { ApiRoute } from './api-route';
 import { SECONDS_PER_DAY } from './clock';
 import { noSuch, refused } from './errors';

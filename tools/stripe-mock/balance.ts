@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import * as z from 'zod';
 import type { ApiRoute } from './api-route';
 import { readParameters } from './parameters';
 import type { Processor } from './processor';

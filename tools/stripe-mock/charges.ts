@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import * as z from 'zod';
 import type { ApiRoute } from './api-route';
 import { midnightAfter, postEntry } from './balance-transactions';
 import { SECONDS_PER_DAY } from './clock';

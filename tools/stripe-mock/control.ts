@@ -1,5 +1,5 @@
 import express, { Router, type ErrorRequestHandler } from 'express';
-import { z } from 'zod';
+import * as z from 'zod';
 import { balanceOf } from './balance';
 import { ApiError } from './errors';
 import { finishAuthentication } from './payment-intent-confirmation';

@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import * as z from 'zod';
 import type { ApiRoute } from './api-route';
 import { noSuch } from './errors';
 import { newId } from './identifiers';

@@ -1,6 +1,7 @@
 import { Router, type Response } from 'express';
 import { balanceOf } from './balance';
 import type { Charge } from './charges';
+import { bankStatement } from './bank-statement';
 import { SECONDS_PER_DAY } from './clock';
 import { ApiError } from './errors';
 import { minorUnits } from './minor-units';
@@ -177,6 +178,11 @@ function sendState(mock: StripeMock, response: Response, note: string | undefine
       ${chargesTable(mock)}
       <h2>Payouts</h2>
       ${payoutsTable(newest(state.payouts))}
+      <p class="quiet">
+        What the demo's bank would show, for the import of a bank statement:
+        <a href="/bank-statement.csv">as it should be</a>,
+        <a href="/bank-statement.csv?short=4200">42.00 short on its newest line</a>.
+      </p>
       <h2>Webhooks</h2>
       ${deliveriesTable(newest(state.deliveries))}
     </main>`;
@@ -206,6 +212,13 @@ export function pageRouter(mock: StripeMock): Router {
     mock.settle();
     const { note } = request.query;
     sendState(mock, response, typeof note === 'string' && Object.hasOwn(notes, note) ? notes[note] : undefined);
+  });
+  router.get('/bank-statement.csv', (request, response) => {
+    mock.settle();
+    const { short, since } = request.query;
+    const number = (value: unknown) => (typeof value === 'string' && /^\d{1,12}$/.test(value) ? Number(value) : 0);
+    response.attachment('bank-statement.csv').type('csv');
+    response.send(bankStatement(mock.state.payouts.values(), { since: number(since), shortBy: number(short) }));
   });
   press('/pay-out', 'paid-out', () => {
     const made = mock.payOut({ includePending: true });

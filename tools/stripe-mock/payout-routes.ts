@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import * as z from 'zod';
 import type { ApiRoute } from './api-route';
 import { listPage, listParameters } from './lists';
 import { amount, currency, mergeMetadata, metadata, readParameters, text } from './parameters';

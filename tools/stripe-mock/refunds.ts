@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import * as z from 'zod';
 import type { ApiRoute } from './api-route';
 import { postEntry } from './balance-transactions';
 import { findCharge, type Charge } from './charges';

@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import * as z from 'zod';
 import { defaultFees, type FeeSchedule } from './fees';
 import { defaultTiming, type Timing } from './processor';
 

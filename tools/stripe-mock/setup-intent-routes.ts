@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import * as z from 'zod';
 import type { ApiCall, ApiRoute } from './api-route';
 import { findCustomer } from './customers';
 import { newId, randomText } from './identifiers';

@@ -1,6 +1,6 @@
 import { existsSync, mkdirSync, readFileSync, renameSync, writeFileSync } from 'node:fs';
 import { dirname } from 'node:path';
-import { z } from 'zod';
+import * as z from 'zod';
 import type { Clock } from './clock';
 import { collectionNames, refill, toRecord, type State, type StateRecord } from './state';
 

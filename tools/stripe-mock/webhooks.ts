@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import * as z from 'zod';
 import type { Clock } from './clock';
 import { noSuch } from './errors';
 import { names, type Event } from './events';

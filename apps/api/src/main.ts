@@ -12,7 +12,7 @@ async function main(): Promise<void> {
   const log = createLog(config.LOG_LEVEL, 'api');
   const database = openDatabase(config.APP_DATABASE_URL);
   const clock = config.SEAMWRIGHT_MODE === 'production' ? systemClock : new MovableClock(database);
-  const house = buildHouse({ config, database, clock });
+  const house = buildHouse({ config, database, clock, log });
   const live = new LiveHub(config.APP_DATABASE_URL, log);
   await live.start();
   const app = createServer(
@@ -41,6 +41,7 @@ async function main(): Promise<void> {
     server.close(resolve);
     server.closeIdleConnections();
   });
+  house.close();
   await database.close();
 }
 

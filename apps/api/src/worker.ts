@@ -9,13 +9,14 @@ async function main(): Promise<void> {
   const log = createLog(config.LOG_LEVEL, 'worker');
   const database = openDatabase(config.WORKER_DATABASE_URL);
   const clock = config.SEAMWRIGHT_MODE === 'production' ? systemClock : new MovableClock(database);
-  const { subscribers, periodic } = buildHouse({ config, database, clock });
+  const { subscribers, periodic, close } = buildHouse({ config, database, clock, log });
   const worker = await startWorker({ database, clock, log }, config.WORKER_DATABASE_URL, subscribers, periodic);
   log.info('working');
 
   await untilStopped();
   log.info('draining');
   await worker.stop();
+  close();
   await database.close();
 }
 

@@ -6,6 +6,11 @@ import { ChangeDetectionStrategy, Component, signal, type Type } from '@angular/
   selector: 'sw-next-delivery-slot',
   imports: [NgComponentOutlet],
   template: `<ng-container *ngComponentOutlet="content()" />`,
+  styles: `
+    :host {
+      display: flex;
+    }
+  `,
   changeDetection: ChangeDetectionStrategy.OnPush,
 })
 export class NextDeliverySlot {

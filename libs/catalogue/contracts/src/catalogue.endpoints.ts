@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import * as z from 'zod';
 import { BONE_STATES, SPECIES } from '@seamwright/catalogue/domain';
 import {
   defineEndpoint,

@@ -1,4 +1,5 @@
-import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
+import { ChangeDetectionStrategy, Component, computed, input, signal } from '@angular/core';
+import { MatButton } from '@angular/material/button';
 import { RouterLink } from '@angular/router';
 import type { CatalogueCounts, CatalogueFilters } from '@seamwright/catalogue/data-access';
 import { boneStateName, speciesName } from '@seamwright/catalogue/ui';
@@ -12,35 +13,14 @@ interface FilterValue {
   readonly query: Readonly<Record<string, string | null>>;
 }
 
-/** What the catalogue can be narrowed to, each with how many it would leave. Pressed again, a filter is taken off. */
+/**
+ * What the catalogue can be narrowed to, each with how many it would leave. Pressed again, a filter is taken off. On a
+ * small screen it is folded away behind a button, with what is on beside it.
+ */
 @Component({
   selector: 'sw-catalogue-filter-panel',
-  imports: [Icon, RouterLink],
-  template: `
-    @for (group of groups(); track group.name) {
-      <section>
-        <h2>{{ group.name }}</h2>
-        <ul>
-          @for (value of group.values; track value.name) {
-            <li>
-              <a
-                [routerLink]="[]"
-                [queryParams]="value.query"
-                queryParamsHandling="merge"
-                [attr.aria-current]="value.on ? 'true' : null"
-              >
-                @if (value.on) {
-                  <sw-icon name="check" [size]="16" />
-                }
-                <span>{{ value.name }}</span>
-                <span class="count">{{ value.count }}</span>
-              </a>
-            </li>
-          }
-        </ul>
-      </section>
-    }
-  `,
+  imports: [Icon, MatButton, RouterLink],
+  templateUrl: './catalogue-filter-panel.html',
   styleUrl: './catalogue-filter-panel.scss',
   host: { role: 'navigation', '[attr.aria-label]': 'label' },
   changeDetection: ChangeDetectionStrategy.OnPush,
@@ -48,8 +28,20 @@ interface FilterValue {
 export class CatalogueFilterPanel {
   readonly filters = input.required<CatalogueFilters>();
   readonly counts = input.required<CatalogueCounts>();
+  /** How many cards are shown, and whether there are more than those. */
+  readonly found = input.required<number>();
+  readonly more = input(false);
 
+  protected readonly open = signal(false);
   protected readonly label = $localize`:@@catalogue.filter.label:Narrow the catalogue`;
+  protected readonly showWords = computed(() => {
+    const found = this.found();
+    if (found === 0) return $localize`:@@catalogue.filter.nothing:Nothing fits: take a filter off`;
+    if (found === 1) return $localize`:@@catalogue.filter.showOne:Show one cut`;
+    return this.more()
+      ? $localize`:@@catalogue.filter.showAll:Show what fits`
+      : $localize`:@@catalogue.filter.show:Show ${found}:count: cuts`;
+  });
   protected readonly groups = computed(() => {
     const { species, primal, boneState } = this.filters();
     const counts = this.counts();
@@ -79,4 +71,5 @@ export class CatalogueFilterPanel {
       },
     ].filter(({ values }) => values.length > 0);
   });
+  protected readonly on = computed(() => this.groups().flatMap(({ values }) => values.filter(({ on }) => on)));
 }

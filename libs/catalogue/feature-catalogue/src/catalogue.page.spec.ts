@@ -50,7 +50,8 @@ describe('the catalogue page', () => {
     const harness = await RouterTestingHarness.create(address);
     const http = TestBed.inject(HttpTestingController);
     const host = harness.routeNativeElement as HTMLElement;
-    const link = (words: string) => [...host.querySelectorAll('a')].find((each) => each.textContent?.includes(words));
+    const link = (words: string, within = '') =>
+      [...host.querySelectorAll(`${within} a`)].find((each) => each.textContent?.includes(words));
     return { harness, http, host, link };
   };
 
@@ -60,8 +61,60 @@ describe('the catalogue page', () => {
     await harness.fixture.whenStable();
     expect(link('Striploin steak')?.getAttribute('href')).toBe('/catalogue/BF-201');
     expect(link('Lamb')?.textContent).toContain('0');
-    expect(link('Beef')?.getAttribute('aria-current')).toBe('true');
-    expect(link('Beef')?.getAttribute('href')).toBe('/catalogue?q=strip&bone=nonsense');
+    expect(link('Beef', '.groups')?.getAttribute('aria-current')).toBe('true');
+    expect(link('Beef', '.groups')?.getAttribute('href')).toBe('/catalogue?q=strip&bone=nonsense');
+  });
+
+  it('folds the filters away on a small screen, with those that are on still there to take off', async () => {
+    const { harness, http, host, link } = await open('/catalogue?species=beef');
+    http.expectOne('/api/v1/specifications?species=beef').flush({ items: [card], nextCursor: null, counts });
+    await harness.fixture.whenStable();
+    expect(link('Beef', '.bar')?.getAttribute('href')).toBe('/catalogue');
+    const button = host.querySelector<HTMLButtonElement>('.bar button');
+    expect(button?.getAttribute('aria-expanded')).toBe('false');
+    button?.click();
+    await harness.fixture.whenStable();
+    expect(button?.getAttribute('aria-expanded')).toBe('true');
+    const show = host.querySelector<HTMLButtonElement>('.show');
+    expect(show?.textContent).toContain('Show one cut');
+    show?.click();
+    await harness.fixture.whenStable();
+    expect(button?.getAttribute('aria-expanded')).toBe('false');
+  });
+
+  it('asks once for the prices of all cards, and says where there is none', async () => {
+    const { harness, http, host } = await open('/catalogue');
+    const other = { ...card, specificationId: 'b0', code: 'LM-104', name: 'Shoulder of lamb' };
+    http.expectOne('/api/v1/specifications').flush({ items: [card, other], nextCursor: null, counts });
+    await harness.fixture.whenStable();
+    http
+      .expectOne(({ url }) => url === '/api/v1/delivery-days')
+      .flush({
+        serverTime: '2026-12-01T10:00:00Z',
+        days: [
+          { day: '2026-12-02', cutOffAt: '2026-12-01T16:00:00Z', closed: true },
+          { day: '2026-12-04', cutOffAt: '2026-12-03T16:00:00Z', closed: false },
+        ],
+      });
+    await harness.fixture.whenStable();
+    const asked = http.expectOne('/api/v1/price-checks');
+    expect(asked.request.body).toMatchObject({
+      deliveryDay: '2026-12-04',
+      lines: [{ specificationId: 'a0' }, { specificationId: 'b0' }],
+    });
+    const [price, amounts] = [{ basis: 'kg', priceMinor: 2360 }, { estimateMinor: 661 }];
+    asked.flush({
+      lines: [
+        { ok: true, price, amounts },
+        { ok: false, code: 'no-price', message: 'No price' },
+      ],
+    });
+    await harness.fixture.whenStable();
+    const shown = [...host.querySelectorAll('sw-specification-card .price')].map(({ textContent }) =>
+      textContent?.replace(/\s+/g, ' ').trim(),
+    );
+    expect(shown).toEqual(['£23.60/kg ≈ £6.61/steak', 'Price on request']);
+    expect(host.querySelector('.count')?.textContent).toContain('Your prices for Fri 4 Dec');
   });
 
   it('says when nothing fits and offers the whole catalogue', async () => {

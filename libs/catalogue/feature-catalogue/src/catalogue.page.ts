@@ -10,6 +10,7 @@ import {
 import { BONE_STATES, SPECIES, type BoneState, type Species } from '@seamwright/catalogue/domain';
 import { Empty, ErrorState, Loading, PageHead } from '@seamwright/shared/ui';
 import { CatalogueFilterPanel } from './catalogue-filter-panel';
+import { CardPrices } from './card-prices';
 import { CatalogueSearch } from './catalogue-search';
 import { SpecificationCardLink } from './specification-card';
 
@@ -28,6 +29,7 @@ const oneOf = <T extends string>(list: readonly T[], value: string | undefined):
     PageHead,
     SpecificationCardLink,
   ],
+  providers: [CardPrices],
   templateUrl: './catalogue.page.html',
   styleUrl: './catalogue.page.scss',
   changeDetection: ChangeDetectionStrategy.OnPush,
@@ -42,6 +44,7 @@ export class CataloguePage {
   readonly #store = inject(Store);
   readonly #router = inject(Router);
 
+  protected readonly own = inject(CardPrices);
   protected readonly found = this.#store.selectSignal(catalogueListFeature.selectFound);
   protected readonly cards = this.#store.selectSignal(catalogueListFeature.selectCards);
   protected readonly counts = this.#store.selectSignal(catalogueListFeature.selectCounts);
@@ -58,6 +61,7 @@ export class CataloguePage {
 
   constructor() {
     effect(() => this.#store.dispatch(CatalogueListPageActions.searchAsked({ filters: this.filters() })));
+    effect(() => this.own.show(this.cards().map(({ specificationId }) => specificationId)));
   }
 
   protected search(words: string): void {

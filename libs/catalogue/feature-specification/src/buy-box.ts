@@ -1,7 +1,7 @@
 import { ChangeDetectionStrategy, Component, computed, input, output } from '@angular/core';
 import { MatButton } from '@angular/material/button';
 import type { LineWeights, PieceKind } from '@seamwright/catalogue/domain';
-import { pieceName } from '@seamwright/catalogue/ui';
+import { pieceName, weightText } from '@seamwright/catalogue/ui';
 import {
   ErrorState,
   Ladder,
@@ -76,7 +76,12 @@ export class BuyBox {
     { value: 'kg', label: $localize`:@@catalogue.buy.kg:about kg` },
   ]);
   protected readonly unitWord = computed(() => {
-    const words = { piece: this.pieces(), case: $localize`:@@catalogue.buy.cases:cases`, kg: 'kg' };
+    const one = this.amount() === 1;
+    const words = {
+      piece: one ? this.onePiece() : this.pieces(),
+      case: one ? $localize`:@@catalogue.buy.case:case` : $localize`:@@catalogue.buy.cases:cases`,
+      kg: 'kg',
+    };
     return words[this.unit()];
   });
   protected readonly quantityLabel = computed(
@@ -92,6 +97,13 @@ export class BuyBox {
         atMost: step(weights.maxGrams, price?.maxMinor),
       }
     );
+  });
+  /** What the act at the foot of a small screen would put in: "24 steaks · 6.720 kg". */
+  protected readonly orderWords = computed(() => {
+    const weights = this.weights();
+    if (!weights) return '';
+    const pieces = `${weights.pieces} ${pieceName(this.pieceKind(), weights.pieces)}`;
+    return `${pieces} · ${weightText(weights.estimateGrams)}`;
   });
   /** "About 12 kg" comes to whole pieces; the buyer sees how many. */
   protected readonly piecesOfKg = computed(() => {

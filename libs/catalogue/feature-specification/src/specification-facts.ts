@@ -11,7 +11,7 @@ import { pieceName, weightText } from '@seamwright/catalogue/ui';
       <div>
         <dt>{{ pieceWord() }}</dt>
         <dd>
-          <b>{{ weight() }}</b> <span class="sw-unit">{{ weightRange() }}</span>
+          <b>{{ weight() }}</b> <span class="sw-unit range">{{ weightRange() }}</span>
         </dd>
       </div>
       <div>

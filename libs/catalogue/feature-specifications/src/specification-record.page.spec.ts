@@ -58,7 +58,7 @@ describe('the record of a specification', () => {
     const { host } = await open(true);
     const rows = [...host.querySelectorAll('sw-record-outputs tr')].map((row) => row.textContent ?? '');
     // 100 − 78 − 9 = 13 %.
-    expect(rows.find((row) => row.includes('Cutting loss'))).toContain('13%');
+    expect(rows.find((row) => row.includes('Cutting loss'))).toContain('13\u00a0%');
     expect(host.textContent).toContain('These dimensions imply');
   });
 

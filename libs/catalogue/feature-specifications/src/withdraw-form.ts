@@ -13,7 +13,7 @@ import { FieldError } from '@seamwright/shared/ui/forms';
   template: `
     <sw-card heading="Withdraw" i18n-heading="@@catalogue.withdraw.form">
       <form (submit)="send($event)">
-        <mat-form-field>
+        <mat-form-field appearance="outline" floatLabel="always">
           <mat-label i18n="@@catalogue.withdraw.reason">Reason</mat-label>
           <input matInput maxlength="300" [formControl]="reason" />
           <mat-error><sw-field-error [control]="reason" /></mat-error>

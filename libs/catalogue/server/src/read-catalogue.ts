@@ -1,3 +1,4 @@
+import * as z from 'zod';
 import type { Answer, CheckedInput } from '@seamwright/shared/contracts';
 import type {
   PublicSpecification,
@@ -38,8 +39,8 @@ export async function searchCatalogue(tx: Tx, { cursor, limit, ...filters }: Que
 }
 
 function placeOf(cursor: string): { score: number; code: string } {
-  const [score, code] = readCursor(cursor, 2);
-  return { score: Number(score), code: String(code) };
+  const [score, code] = readCursor(cursor, z.tuple([z.int(), z.string()]));
+  return { score, code };
 }
 
 function countsOf(counts: readonly FilterCount[], nodes: ReadonlyMap<string, CutNode>): SearchAnswer['counts'] {
@@ -86,7 +87,7 @@ export async function listNewestVersions(
   { cursor, limit, q }: { cursor?: string | undefined; limit: number; q?: string | undefined },
 ): Promise<{ items: SpecificationRow[]; nextCursor: string | null }> {
   const nodes = await cutNodes(tx);
-  const after = cursor ? String(readCursor(cursor, 1)[0]) : null;
+  const after = cursor ? readCursor(cursor, z.tuple([z.string()]))[0] : null;
   const rows = await newestVersions(tx, { q, after, limit: limit + 1 });
   return pageFrom(
     rows,

@@ -30,20 +30,20 @@ describe('the drawing on a page', () => {
     const svg = await drawn(STEAK);
     expect(svg.getAttribute('role')).toBe('img');
     expect(svg.getAttribute('aria-label')).toBe(
-      'Drawing to scale: 148 mm long, 78 mm wide, 26 mm thick; fat cover 6 mm at most; boneless; plain; weighs 280\u2009g, from 266\u2009g to 294\u2009g.',
+      'Drawing to scale: 148 mm long, 78 mm wide, 26 mm thick; fat cover 6 mm at most; boneless; plain; weighs 280\u00a0g, from 266\u00a0g to 294\u00a0g.',
     );
   });
 
   it('writes measures, fat cover, scale and weights', async () => {
     const all = words(await drawn(STEAK));
     for (const word of [
-      '148\u2009mm',
-      '78\u2009mm',
-      '26\u2009mm',
+      '148\u00a0mm',
+      '78\u00a0mm',
+      '26\u00a0mm',
       'fat cover 6 mm at most',
-      '266\u2009g',
-      '280\u2009g',
-      '294\u2009g',
+      '266\u00a0g',
+      '280\u00a0g',
+      '294\u00a0g',
     ]) {
       expect(all).toContain(word);
     }
@@ -55,6 +55,15 @@ describe('the drawing on a page', () => {
     const width = Number(svg.getAttribute('viewBox')?.split(' ')[2]);
     expect(svg.style.inlineSize || svg.getAttribute('style')).toContain(`${width}`);
     expect(parseFloat(svg.style.fontSize) * (96 / 25.4)).toBeCloseTo(13, 3);
+  });
+
+  it('fits any usual sheet when it is printed, so that its scale stays true', async () => {
+    const svg = await drawn(STEAK);
+    const onScreen = svg.getAttribute('viewBox');
+    window.dispatchEvent(new Event('beforeprint'));
+    expect(svg.getAttribute('viewBox')).toMatch(/^0 0 170 /);
+    window.dispatchEvent(new Event('afterprint'));
+    expect(svg.getAttribute('viewBox')).toBe(onScreen);
   });
 
   it('has no fat to write of on a denuded piece', async () => {

@@ -1,5 +1,5 @@
-import { formatKgWithUnit, grams } from '@seamwright/shared/util';
+import { formatKgWithUnit, grams, UNIT_SPACE } from '@seamwright/shared/util';
 
 /** A piece's weight as the trade says it: grams below a kilogram, kilograms from there on. */
 export const weightText = (weight: number): string =>
-  weight < 1000 ? `${weight}\u2009g` : formatKgWithUnit(grams(weight));
+  weight < 1000 ? `${weight}${UNIT_SPACE}g` : formatKgWithUnit(grams(weight));

@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import * as z from 'zod';
 import { defineEndpoint, id, instant, line, ROLES, rowVersion, staffOnly } from '@seamwright/shared/contracts';
 import { application, password, sessionPerson } from './session.endpoints';
 

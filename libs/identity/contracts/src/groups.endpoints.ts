@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import * as z from 'zod';
 import { defineEndpoint, id, line, STAFF_ROLES, staffOnly } from '@seamwright/shared/contracts';
 
 export const group = z.strictObject({ id, name: z.string() });

@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import * as z from 'zod';
 import { anyone, defineEndpoint, email, line } from '@seamwright/shared/contracts';
 import { application, password, signedIn } from './session.endpoints';
 

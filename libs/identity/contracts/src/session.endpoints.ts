@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import * as z from 'zod';
 import { anyone, defineEndpoint, email, id, ROLES } from '@seamwright/shared/contracts';
 
 export const application = z.enum(['storefront', 'admin']);

@@ -21,7 +21,7 @@ import { PageHead } from '@seamwright/shared/ui';
       sub="The staff of the house. A customer’s people stand on the customer’s page."
       i18n-sub="@@identity.people.sub"
     />
-    <mat-form-field appearance="outline" class="search" subscriptSizing="dynamic">
+    <mat-form-field appearance="outline" floatLabel="always" class="search" subscriptSizing="dynamic">
       <mat-label i18n="@@identity.people.search">Search by name or e-mail</mat-label>
       <input matInput type="search" [formControl]="search" />
     </mat-form-field>

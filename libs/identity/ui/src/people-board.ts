@@ -66,6 +66,11 @@ export interface PeopleDesk {
       padding-block-start: 16px;
     }
 
+    // As high as its row, so that its word stands on the row's line and ends at the table's edge.
+    .edit {
+      margin: calc(var(--sw-cell-block) * -1) -10px;
+    }
+
     button sw-icon {
       margin-inline-end: 4px;
       vertical-align: -4px;

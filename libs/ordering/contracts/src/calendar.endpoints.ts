@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import * as z from 'zod';
 import { defineEndpoint, id, line, minor, plantDay, rowVersion, staffOnly } from '@seamwright/shared/contracts';
 
 const zoneFields = {

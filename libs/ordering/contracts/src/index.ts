@@ -16,6 +16,7 @@ export {
   getOrder,
   listOrders,
   ORDER_FILTERS,
+  payOrderWith,
   placeOrder,
   type NewOrderWire,
   type OrderDetail,

@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import * as z from 'zod';
 import { MOST_LINES, ORDER_STAGES, WHEN_SHORT } from '@seamwright/ordering/domain';
 import { chosenValues, lineAmountsWire, priceAnswer, priceBasis, quantityWire } from '@seamwright/pricing/contracts';
 import {
@@ -198,6 +198,18 @@ export const cancelOrder = defineEndpoint({
   access: ownCustomer('buyer', 'buyer_owner', 'rep', 'planner', 'admin'),
   params: { orderId: id },
   body: z.strictObject({ reason: note(300).default('') }),
+  response: orderDetail,
+  guarded: true,
+});
+
+export const payOrderWith = defineEndpoint({
+  id: 'orders.pay-with',
+  summary: 'Has another card held for an order that still waits for payment, after the last one was declined',
+  method: 'POST',
+  path: '/orders/:orderId/card',
+  access: ownCustomer('buyer', 'buyer_owner', 'rep', 'admin'),
+  params: { orderId: id },
+  body: z.strictObject({ cardId: id }),
   response: orderDetail,
   guarded: true,
 });

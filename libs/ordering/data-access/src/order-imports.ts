@@ -7,7 +7,7 @@ import {
   uploadOrders,
   type OrderImportWire,
 } from '@seamwright/ordering/contracts';
-import { ApiClient, type FileDownload } from '@seamwright/shared/data-access';
+import { ApiClient, type FileDownload, type UploadStep } from '@seamwright/shared/data-access';
 
 /** Orders from a workbook: looked at first, then taken once. The same key makes the same deed. */
 @Injectable({ providedIn: 'root' })
@@ -18,8 +18,9 @@ export class OrderImports {
     return this.#api.download(getImportTemplate, {});
   }
 
-  upload(file: File, idempotencyKey: string): Observable<OrderImportWire> {
-    return this.#api.call(uploadOrders, { file, idempotencyKey });
+  /** Tells how much of the file is sent; what was read of it comes with the last step. */
+  upload(file: File, idempotencyKey: string): Observable<UploadStep<typeof uploadOrders>> {
+    return this.#api.upload(uploadOrders, { file, idempotencyKey });
   }
 
   read(importId: string): Observable<OrderImportWire> {

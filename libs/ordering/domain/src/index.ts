@@ -29,6 +29,7 @@ export {
   type OrderStage,
   type WaitingFor,
 } from './order-stage';
+export { checkOtherCard, type WaitingOrder } from './other-card';
 export { WHEN_SHORT, type WhenShort } from './when-short';
 export { packedAmount, type Packed, type PricedLine } from './packed-amount';
 export {

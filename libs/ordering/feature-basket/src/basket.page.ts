@@ -1,4 +1,4 @@
-import { ChangeDetectionStrategy, Component, computed, inject } from '@angular/core';
+import { ChangeDetectionStrategy, Component, computed, inject, LOCALE_ID } from '@angular/core';
 import { takeUntilDestroyed, toSignal } from '@angular/core/rxjs-interop';
 import { MatButton } from '@angular/material/button';
 import { MatFormField, MatLabel } from '@angular/material/form-field';
@@ -19,8 +19,9 @@ import {
 } from '@seamwright/ordering/data-access';
 import { DeliveryDayPicker, OrderTotalsBox } from '@seamwright/ordering/ui';
 import { HOUSE_CURRENCY } from '@seamwright/pricing/domain';
-import { Card, Empty, ErrorState, Loading, PageHead, Toast } from '@seamwright/shared/ui';
+import { Card, Empty, ErrorState, Loading, Money, PageHead, Toast } from '@seamwright/shared/ui';
 import { Choice, type ChoiceOption } from '@seamwright/shared/ui/forms';
+import { formatPlantDate, isPlantDate } from '@seamwright/shared/util';
 import { BasketLineRow } from './basket-line-row';
 import { CardPicker } from './card-picker';
 import { PaymentCards } from './payment-cards';
@@ -43,6 +44,7 @@ import { PaymentCards } from './payment-cards';
     MatLabel,
     MatOption,
     MatSelect,
+    Money,
     OrderTotalsBox,
     PageHead,
     RouterLink,
@@ -55,6 +57,7 @@ export class BasketPage {
   private readonly store = inject(Store);
   private readonly router = inject(Router);
   private readonly toast = inject(Toast);
+  private readonly locale = inject(LOCALE_ID);
 
   protected readonly draft = this.store.selectSignal(basketFeature.selectDraft);
   protected readonly lines = this.store.selectSignal(checkoutFeature.selectLines);
@@ -87,6 +90,13 @@ export class BasketPage {
       note: $localize`:@@basket.settlement.card.note:the most is held, the real weight is charged`,
     },
   ];
+  /** The day that the order would be for: "for Fri 4 Dec". */
+  protected readonly dayWords = computed(() => {
+    const day = this.day();
+    return day && isPlantDate(day)
+      ? $localize`:@@basket.forDay:for ${formatPlantDate(day, 'short', this.locale)}:day:`
+      : '';
+  });
   /** What is asked of the placing's answer at its fields, beside what is wrong as a whole. */
   protected readonly refusals = computed(() => {
     const problem = this.placing().problem;

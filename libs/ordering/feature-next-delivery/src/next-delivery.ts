@@ -16,6 +16,11 @@ const ASK_AGAIN_MS = 15 * 60_000;
       <sw-cut-off [day]="shown.day" [minutesLeft]="shown.minutesLeft" />
     }
   `,
+  styles: `
+    :host {
+      display: flex;
+    }
+  `,
   changeDetection: ChangeDetectionStrategy.OnPush,
 })
 export class NextDelivery {

@@ -1,7 +1,7 @@
 import { TestbedHarnessEnvironment } from '@angular/cdk/testing/testbed';
 import { TestBed } from '@angular/core/testing';
 import { provideRouter } from '@angular/router';
-import { of, throwError } from 'rxjs';
+import { of, Subject, throwError } from 'rxjs';
 import type { OrderImportWire } from '@seamwright/ordering/contracts';
 import { OrderImports } from '@seamwright/ordering/data-access';
 import { ApiProblem } from '@seamwright/shared/data-access';
@@ -42,6 +42,7 @@ const aSheet = (stated: Partial<OrderImportWire> = {}): OrderImportWire => ({
   placed: [],
   ...stated,
 });
+const read = (sheet: OrderImportWire) => of({ percent: 100, answer: sheet });
 const fault = { row: 3, column: 'F', code: 'cell-formula', message: 'This cell holds a formula.' };
 
 const taken: unknown[][] = [];
@@ -77,7 +78,7 @@ async function open(upload: () => ReturnType<OrderImports['upload']>) {
 
 describe('orders from a workbook', () => {
   it('names each bad cell by row and column, and takes the good rows when that is chosen', async () => {
-    const { fixture, page, button, loader } = await open(() => of(aSheet({ faults: [fault] })));
+    const { fixture, page, button, loader } = await open(() => read(aSheet({ faults: [fault] })));
     const table = await loader.getHarness(DataTableHarness);
     expect(await table.rows()).toEqual([['3', 'F', 'This cell holds a formula.']]);
     expect(button('Place the orders')?.disabled).toBe(true);
@@ -91,10 +92,27 @@ describe('orders from a workbook', () => {
   });
 
   it('takes a sheet without faults whole', async () => {
-    const { fixture, button } = await open(() => of(aSheet()));
+    const { fixture, button } = await open(() => read(aSheet()));
     button('Place the orders')?.click();
     await fixture.whenStable();
     expect(taken[0]?.[1]).toBe('all-or-none');
+  });
+
+  it('tells how much is sent, then that it is being read', async () => {
+    const steps = new Subject<{ percent: number; answer: OrderImportWire | null }>();
+    const { fixture, page } = await open(() => steps);
+    const bar = () => page.querySelector('progress');
+    steps.next({ percent: 40, answer: null });
+    await fixture.whenStable();
+    expect(bar()?.value).toBe(40);
+    expect(page.textContent).not.toContain('Reading the workbook');
+    steps.next({ percent: 100, answer: null });
+    await fixture.whenStable();
+    expect(page.textContent).toContain('Reading the workbook');
+    steps.next({ percent: 100, answer: aSheet() });
+    await fixture.whenStable();
+    expect(bar()).toBeNull();
+    expect(page.textContent).toContain('Place these orders');
   });
 
   it('says at the file why it can’t be read', async () => {

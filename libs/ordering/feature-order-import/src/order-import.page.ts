@@ -39,7 +39,8 @@ export class OrderImportPage {
   private readonly imports = inject(OrderImports);
 
   protected readonly preview = signal<OrderImportWire | null>(null);
-  protected readonly reading = signal(false);
+  /** How much of the file is sent, in per cent; at 100 it is being read. Null when nothing is under way. */
+  protected readonly sent = signal<number | null>(null);
   protected readonly taking = signal(false);
   protected readonly fileError = signal('');
   protected readonly problem = signal<Problem | null>(null);
@@ -93,19 +94,20 @@ export class OrderImportPage {
   }
 
   protected send(file: File): void {
-    this.reading.set(true);
+    this.sent.set(0);
     this.fileError.set('');
     this.problem.set(null);
     this.preview.set(null);
     this.chosenHow.set(null);
     this.imports.upload(file, newId()).subscribe({
-      next: (preview) => {
-        this.reading.set(false);
-        this.preview.set(preview);
+      next: ({ percent, answer }) => {
+        this.sent.set(answer ? null : percent);
+        if (!answer) return;
+        this.preview.set(answer);
         this.takingKey = newId();
       },
       error: (error: unknown) => {
-        this.reading.set(false);
+        this.sent.set(null);
         this.fileError.set(asProblem(error).detail);
       },
     });

@@ -6,13 +6,13 @@ import type { OrderListItem } from '@seamwright/ordering/contracts';
 import { OrderListPageActions, ordersFeature } from '@seamwright/ordering/data-access';
 import { OrderStageChip, paymentWords } from '@seamwright/ordering/ui';
 import { HOUSE_CURRENCY } from '@seamwright/pricing/domain';
-import { Empty, ErrorState, PageHead } from '@seamwright/shared/ui';
+import { Card, Empty, ErrorState, PageHead } from '@seamwright/shared/ui';
 import { DataTable, TableCell, type TableColumn } from '@seamwright/shared/ui/table';
 
 /** The buyer's orders, newest first. */
 @Component({
   selector: 'sw-orders-page',
-  imports: [DataTable, Empty, ErrorState, MatButton, OrderStageChip, PageHead, RouterLink, TableCell],
+  imports: [Card, DataTable, Empty, ErrorState, MatButton, OrderStageChip, PageHead, RouterLink, TableCell],
   templateUrl: './orders.page.html',
   changeDetection: ChangeDetectionStrategy.OnPush,
 })
@@ -24,7 +24,13 @@ export class OrdersPage {
   protected readonly hasMore = this.store.selectSignal(ordersFeature.selectHasMore);
   protected readonly rows = computed(() => this.list().data ?? []);
   protected readonly loading = computed(() => this.list().status === 'loading');
-  protected readonly columns: readonly TableColumn<OrderListItem>[] = [
+  /** The site is told where there is more than one. */
+  protected readonly columns = computed(() =>
+    new Set(this.rows().map(({ site }) => site.id)).size > 1
+      ? this.#columns
+      : this.#columns.filter(({ key }) => key !== 'site'),
+  );
+  readonly #columns: readonly TableColumn<OrderListItem>[] = [
     {
       key: 'number',
       label: $localize`:@@orders.column.number:Order`,

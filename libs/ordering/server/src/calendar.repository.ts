@@ -40,10 +40,10 @@ export async function sitesInZones(tx: Tx, customerIds: readonly string[]): Prom
   }));
 }
 
-/** A month back, since lead days may reach past the day itself. */
-const BACK_DAYS = 31;
+/** Lead days, and the cutting before a delivery, may reach back past the day itself. */
+const BACK_DAYS = 60;
 
-/** The days from a month before `day` on when the plant is closed. */
+/** The days from two months before `day` on when the plant is closed. */
 export async function closuresAround(tx: Tx, day: PlantDate): Promise<{ day: PlantDate; reason: string }[]> {
   const rows = await tx
     .selectFrom('plantClosures')
@@ -54,6 +54,7 @@ export async function closuresAround(tx: Tx, day: PlantDate): Promise<{ day: Pla
   return rows.map(({ day: closed, reason }) => ({ day: closed as PlantDate, reason }));
 }
 
+/** The same without reasons: enough to count working days forward or back from `day`. */
 export async function closuresFor(tx: Tx, day: PlantDate): Promise<Closures> {
   return new Set((await closuresAround(tx, day)).map((closure) => closure.day));
 }

@@ -1,6 +1,7 @@
 import type { ClosureWire } from '@seamwright/ordering/contracts';
 import { conflict, notFound, type Tx } from '@seamwright/shared/server';
 import { plantToday, RefusalError, type PlantDate } from '@seamwright/shared/util';
+import { lockDayToClose } from './lock-days';
 import { countOrdersOfDay } from './orders.repository';
 
 interface Closing {
@@ -10,9 +11,10 @@ interface Closing {
   readonly reason: string;
 }
 
-/** Closes the plant for a day. Refuses `day-past`, and `closure-has-orders` (count): those are to be moved first. */
+/** Closes the plant for a day; orders for it that are being placed are waited for. Refuses `day-past`, and `closure-has-orders` (count): those are to be moved first. */
 export async function closePlant(tx: Tx, { now, timeZone, day, reason }: Closing): Promise<ClosureWire> {
   if (day < plantToday(now, timeZone)) throw new RefusalError({ code: 'day-past', params: { day }, pointer: '/day' });
+  await lockDayToClose(tx, day as PlantDate);
   const count = await countOrdersOfDay(tx, day as PlantDate);
   if (count > 0) throw conflict('closure-has-orders', { day, count });
   await tx

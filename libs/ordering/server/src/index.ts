@@ -7,7 +7,8 @@ import type { CardPort, OrderingParts } from './ports';
 
 export type { CardPort, CardState, DayPort, OrderingParts } from './ports';
 export { clearWaiting, markPacked, markShort, releaseOrdersOfDay, type ShortDeed } from './move-orders';
-export { orderById, ordersByIds, ordersOfDay } from './orders.repository';
+export { closuresFor } from './calendar.repository';
+export { countUnpackedOfDay, lockOrder, orderById, ordersByIds, ordersOfDay } from './orders.repository';
 export { placeOrder, type OrderWanted } from './place-order';
 
 export const orderingImplementations = (parts: OrderingParts): Implementation[] => [

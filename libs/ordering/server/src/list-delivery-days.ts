@@ -41,10 +41,10 @@ export async function listDeliveryDaysOf(
   const next = zone
     ? deliveryDays(zone, await closuresFor(tx, plantToday(now, timeZone)), now, timeZone, wanted.count, wanted.leadDays)
     : [];
-  const shown: DeliveryDaysAnswer['days'] = [];
-  for (const { day, cutOffAt } of next) {
-    shown.push({ day, cutOffAt: cutOffAt.toISOString(), closed: await days.isClosed(tx, day) });
-  }
+  const closed = await days.closedDays(
+    tx,
+    next.map(({ day }) => day),
+  );
   return {
     serverTime: now.toISOString(),
     timeZone,
@@ -53,7 +53,7 @@ export async function listDeliveryDaysOf(
     currency: HOUSE_CURRENCY,
     deliveryChargeMinor: zone?.deliveryChargeMinor ?? 0,
     deliveryTaxPpm: DELIVERY_TAX,
-    days: shown,
+    days: next.map(({ day, cutOffAt }) => ({ day, cutOffAt: cutOffAt.toISOString(), closed: closed.has(day) })),
     sites: sites.map(presentSite),
   };
 }

@@ -1,5 +1,6 @@
-import { cancelOrder, getOrder, listOrders, placeOrder } from '@seamwright/ordering/contracts';
+import { cancelOrder, getOrder, listOrders, payOrderWith, placeOrder } from '@seamwright/ordering/contracts';
 import {
+  customersOf,
   implement,
   implementOnce,
   inTransaction,
@@ -7,34 +8,38 @@ import {
   pageFrom,
   readCursor,
   type Implementation,
+  type RequestContext,
 } from '@seamwright/shared/server';
 import { id, instant } from '@seamwright/shared/contracts';
 import { RefusalError } from '@seamwright/shared/util';
-import { z } from 'zod';
+import * as z from 'zod';
 import { cancelOrder as cancel } from './cancel-order';
 import { newestOrders } from './orders.repository';
+import { payOrderWith as payWith } from './pay-order-with';
 import { placeOrder as place } from './place-order';
 import type { OrderingParts } from './ports';
 import { presentOrder, presentOrders } from './present-order';
 
 export function ordersImplementations(parts: OrderingParts): Implementation[] {
   const { cards, clock, timeZone } = parts;
+  // What was committed stands: a hold that failed here is asked for again, and the order shows how it stands.
+  const hold = ({ database, log }: Pick<RequestContext, 'database' | 'log'>, orderId: string): Promise<void> =>
+    cards
+      .hold({ database, clock, log }, orderId)
+      .catch((error: unknown) => log.error({ err: error, orderId }, 'the card was not held'));
   return [
     implementOnce(placeOrder, {
       make: (tx, { now, caller }, { body }) => place(tx, { now, caller }, parts, body),
-      afterCommit: async ({ database, log }, orderId, { body }) => {
-        if (body.settlement !== 'card') return;
-        // What was committed stands: a hold that failed here is asked for again, and the order shows how it stands.
-        await cards
-          .hold({ database, clock, log }, orderId)
-          .catch((error: unknown) => log.error({ err: error, orderId }, 'the card was not held'));
+      afterCommit: async (context, orderId, { body }) => {
+        if (body.settlement === 'card') await hold(context, orderId);
       },
       present: (tx, context, id) => presentOrder(tx, context, parts, id),
     }),
     implement(listOrders, ({ database, caller, now }, { query }) =>
       inTransaction(database, caller, async (tx) => {
         const { limit, cursor, ...filters } = query;
-        const orders = await newestOrders(tx, { ...filters, limit, after: cursor ? readPlace(cursor) : null });
+        const after = cursor ? readPlace(cursor) : null;
+        const orders = await newestOrders(tx, { ...filters, limit, after, customers: customersOf(caller) });
         const shown = await presentOrders(tx, { now, caller }, parts, orders);
         return pageFrom(
           orders,
@@ -58,13 +63,17 @@ export function ordersImplementations(parts: OrderingParts): Implementation[] {
         return presentOrder(tx, context, parts, params.orderId);
       });
     }),
+    implement(payOrderWith, async (context, { params: { orderId }, body: { cardId } }) => {
+      const { database, caller, now, ifMatch: rowVersion } = context;
+      await inTransaction(database, caller, (tx) => payWith(tx, { now, orderId, rowVersion, cardId }, parts));
+      await hold(context, orderId);
+      return inTransaction(database, caller, (tx) => presentOrder(tx, context, parts, orderId));
+    }),
   ];
 }
 
 /** A cursor of the right shape that was written for another list names no instant or no order. */
 function readPlace(cursor: string): { placedAt: string; id: string } {
-  const [placedAt, orderId] = readCursor(cursor, 2);
-  const read = z.strictObject({ placedAt: instant, id }).safeParse({ placedAt, id: orderId });
-  if (!read.success) throw new RefusalError({ code: 'invalid', params: {}, pointer: '/cursor' });
-  return read.data;
+  const [placedAt, orderId] = readCursor(cursor, z.tuple([instant, id]));
+  return { placedAt, id: orderId };
 }

@@ -215,6 +215,14 @@ describe('an order that is refused', () => {
     expect(await refused({ ...order(), priceMinor: 1 })).toEqual([422, 'invalid', '/priceMinor']);
   });
 
+  it('holds control characters in what was typed', async () => {
+    expect(await refused(order({ note: 'ring\u0000first' }))).toEqual([422, 'invalid', '/note']);
+    expect(await refused(order({ customerReference: 'PO\u001b77' }))).toEqual([422, 'invalid', '/customerReference']);
+    const lines = [{ code: 'BF\u0000901', quantity: { unit: 'piece' as const, count: 1 } }];
+    expect(await refused(order({ lines }))).toEqual([422, 'invalid', '/lines/0/code']);
+    expect((await place(order({ note: 'back door\nring first' }))).body.note).toBe('back door\nring first');
+  });
+
   it('names another customer, another site, or another card', async () => {
     expect(await refused(order({ siteId: house.quayside.siteId }))).toEqual([404, 'not-found', undefined]);
     expect(await refused(order({ customerId: house.quayside.id }))).toEqual([404, 'not-found', undefined]);

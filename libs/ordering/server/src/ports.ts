@@ -36,6 +36,8 @@ export interface CardPort {
 export interface DayPort {
   /** Whether a day takes no more orders. Holds a share lock on the day until the transaction ends, so that it can't be closed meanwhile. */
   isClosed(tx: Tx, day: PlantDate): Promise<boolean>;
+  /** Which of these days take no more orders. Only looks: nothing is locked, so it may have changed a moment later. */
+  closedDays(tx: Tx, days: readonly PlantDate[]): Promise<ReadonlySet<PlantDate>>;
 }
 
 /** What the composition root plugs in. */

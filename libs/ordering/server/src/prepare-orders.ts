@@ -30,6 +30,7 @@ import {
   type Result,
 } from '@seamwright/shared/util';
 import { closuresFor, sitesInZones, type SiteInZone } from './calendar.repository';
+import { keepDaysOpen } from './lock-days';
 import { offeredVersions } from './offered-versions';
 import type { OrderingParts } from './ports';
 
@@ -102,8 +103,9 @@ export async function prepareOrders(
 ): Promise<PreparedOrder[]> {
   const closedDays = new Set<PlantDate>();
   // Always in the order of the calendar, so that two of these can't wait for each other.
-  for (const day of [...new Set(wanted.map(({ deliveryDay }) => deliveryDay))].sort())
-    if (await days.isClosed(tx, day)) closedDays.add(day);
+  const wantedDays = [...new Set(wanted.map(({ deliveryDay }) => deliveryDay))].sort();
+  await keepDaysOpen(tx, wantedDays);
+  for (const day of wantedDays) if (await days.isClosed(tx, day)) closedDays.add(day);
   const sites = await sitesInZones(
     tx,
     wanted.map(({ customerId }) => customerId),

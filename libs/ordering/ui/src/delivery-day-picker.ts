@@ -14,6 +14,17 @@ export interface OfferedDay {
   selector: 'sw-delivery-day-picker',
   imports: [Choice],
   template: `<sw-choice [label]="label" [options]="options()" [(value)]="day" />`,
+  styles: `
+    :host {
+      --sw-choice-least: 124px;
+    }
+
+    @media (max-width: 599.98px) {
+      :host {
+        --sw-choice-least: 100px;
+      }
+    }
+  `,
   changeDetection: ChangeDetectionStrategy.OnPush,
 })
 export class DeliveryDayPicker {

@@ -38,10 +38,12 @@ export function changeWords({ what, detail }: ShownChange): string {
       @for (change of shown(); track $index) {
         <li>
           <time [attr.datetime]="change.at">{{ change.time }}</time>
-          <span>{{ change.words }}</span>
-          @if (change.by; as name) {
-            <span class="sw-muted">{{ name }}</span>
-          }
+          <p>
+            {{ change.words }}
+            @if (change.by; as name) {
+              <span class="sw-muted sw-small">{{ name }}</span>
+            }
+          </p>
         </li>
       }
     </ol>
@@ -53,15 +55,20 @@ export function changeWords({ what, detail }: ShownChange): string {
     }
 
     li {
-      display: flex;
-      flex-wrap: wrap;
-      gap: 0 16px;
+      display: grid;
+      grid-template-columns: 7.5em minmax(0, 1fr);
+      gap: 0 12px;
+      align-items: baseline;
       padding-block: 6px;
     }
 
     time {
-      min-inline-size: 9em;
       color: var(--sw-ink-2);
+      font-size: var(--sw-text-small);
+    }
+
+    span {
+      display: block;
     }
   `,
   changeDetection: ChangeDetectionStrategy.OnPush,

@@ -43,7 +43,7 @@ describe('words for an order', () => {
   it('say what was ordered and how many pieces it is', () => {
     expect(quantityWords({ unit: 'piece', count: 1 }, 1, 'en-GB')).toBe('1 piece');
     expect(quantityWords({ unit: 'case', count: 2 }, 24, 'en-GB')).toBe('2 cases · 24 pieces');
-    expect(quantityWords({ unit: 'kg', grams: 12_000 }, 7, 'en-GB')).toBe('about 12.000\u2009kg · 7 pieces');
+    expect(quantityWords({ unit: 'kg', grams: 12_000 }, 7, 'en-GB')).toBe('about 12.000\u00a0kg · 7 pieces');
     expect(quantityWords({ unit: 'kg', grams: 12_000, notLess: true }, 7, 'en-GB')).toContain('at least');
   });
 

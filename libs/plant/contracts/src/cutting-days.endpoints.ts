@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import * as z from 'zod';
 import { STATIONS, SPECIES } from '@seamwright/catalogue/domain';
 import { CAUTIONS, CUTTING_DAY_STATES } from '@seamwright/plant/domain';
 import {

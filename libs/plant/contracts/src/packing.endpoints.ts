@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import * as z from 'zod';
 import { WHEN_SHORT } from '@seamwright/ordering/domain';
 import { CUTTING_DAY_STATES } from '@seamwright/plant/domain';
 import { defineEndpoint, gramsWire, id, instant, line, plantDay, staffOnly } from '@seamwright/shared/contracts';

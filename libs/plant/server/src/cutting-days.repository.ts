@@ -1,8 +1,8 @@
 import { sql } from 'kysely';
 import { notFound, type Tx } from '@seamwright/shared/server';
-import { addDays, newId, type PlantDate } from '@seamwright/shared/util';
-import type { Closures } from '@seamwright/ordering/domain';
-import { cuttingDayOf, type CuttingDay, type CuttingDayState } from '@seamwright/plant/domain';
+import { newId, type PlantDate } from '@seamwright/shared/util';
+import { closuresFor } from '@seamwright/ordering/server';
+import { cuttingDayOf, isClosedToOrders, type CuttingDay, type CuttingDayState } from '@seamwright/plant/domain';
 
 /** A day with what is ordered for it. */
 export interface CountedDay extends CuttingDay {
@@ -36,19 +36,6 @@ const COLUMNS = [
   'd.finishedAt',
 ] as const;
 
-/** How far back a row of closures can push the cutting. */
-const BACK_DAYS = 60;
-
-async function closuresBefore(tx: Tx, day: PlantDate): Promise<Closures> {
-  const rows = await tx
-    .selectFrom('plantClosures')
-    .select('day')
-    .where('day', '<', day)
-    .where('day', '>=', addDays(day, -BACK_DAYS))
-    .execute();
-  return new Set(rows.map((row) => row.day as PlantDate));
-}
-
 /**
  * Makes the delivery day's row when it is not there yet, and holds a share lock on it until the transaction ends: who
  * closes the day waits for those who place orders, and they see it closed afterwards.
@@ -61,7 +48,7 @@ export async function dayForOrders(tx: Tx, deliveryDay: PlantDate): Promise<Cutt
     .values({
       id: newId<'CuttingDay'>(),
       deliveryDay,
-      cuttingDay: cuttingDayOf(deliveryDay, await closuresBefore(tx, deliveryDay)),
+      cuttingDay: cuttingDayOf(deliveryDay, await closuresFor(tx, deliveryDay)),
       state: 'open',
     })
     .onConflict((conflict) => conflict.column('deliveryDay').doNothing())
@@ -80,6 +67,18 @@ export async function sharedDay(tx: Tx, deliveryDay: PlantDate): Promise<Cutting
     .forShare()
     .executeTakeFirst();
   return row ? dayOf(row) : null;
+}
+
+/** Which of these days are closed to orders; a day that nothing was ordered for is open. Locks nothing. */
+export async function daysClosedToOrders(tx: Tx, days: readonly PlantDate[]): Promise<Set<PlantDate>> {
+  if (days.length === 0) return new Set();
+  const rows = await tx
+    .selectFrom('cuttingDays')
+    .select(['deliveryDay', 'state'])
+    .where('deliveryDay', '=', sql<string>`any(${[...days]}::date[])`)
+    .execute();
+  const closed = rows.filter(({ state }) => isClosedToOrders(state as CuttingDayState));
+  return new Set(closed.map(({ deliveryDay }) => deliveryDay as PlantDate));
 }
 
 /** The day, locked for moving it: waits for all who hold its share. Throws `not-found`. */
@@ -170,17 +169,4 @@ export async function latestDays(tx: Tx, { limit, before, state }: DaysWanted): 
   if (before !== undefined) query = query.where('d.deliveryDay', '<', before);
   if (state !== undefined) query = query.where('d.state', '=', state);
   return (await query.execute()).map(countedOf);
-}
-
-/** Released orders of a day that are not packed yet. */
-export async function countUnpacked(tx: Tx, deliveryDay: PlantDate): Promise<number> {
-  const { count } = await tx
-    .selectFrom('orders')
-    .select(sql<number>`count(*)`.as('count'))
-    .where('deliveryDay', '=', deliveryDay)
-    .where('cancelledAt', 'is', null)
-    .where('releasedAt', 'is not', null)
-    .where('packedAt', 'is', null)
-    .executeTakeFirstOrThrow();
-  return count;
 }

@@ -1,3 +1,5 @@
+import * as z from 'zod';
+import { plantDay } from '@seamwright/shared/contracts';
 import * as days from '@seamwright/plant/contracts';
 import {
   implement,
@@ -53,7 +55,7 @@ const reading =
 export const cuttingDayImplementations = (parts: PlantParts): Implementation[] => [
   implement(days.listCuttingDays, ({ database, caller }, { query: { cursor, limit, state } }) =>
     inTransaction(database, caller, async (tx) => {
-      const before = cursor ? String(readCursor(cursor, 1)[0]) : undefined;
+      const before = cursor ? readCursor(cursor, z.tuple([plantDay]))[0] : undefined;
       return pageFrom(
         await latestDays(tx, { limit, before, state }),
         limit,

@@ -9,10 +9,9 @@ import {
   releaseCuttingDay,
 } from '@seamwright/plant/contracts';
 import { inTransaction, system } from '@seamwright/shared/server';
-import { TEST_NOW } from '@seamwright/shared/server/testing';
+import { TEST_NOW, waitForLock } from '@seamwright/shared/server/testing';
 import { newId, unwrap, type PlantDate } from '@seamwright/shared/util';
 import { DELIVERY_DAY, openTestPlant, type TestPlant } from '../testing/src/index';
-import { sql } from 'kysely';
 import { lockDay } from './cutting-days.repository';
 import { cuttingDayPort } from './day-port';
 
@@ -159,7 +158,7 @@ describe('a cutting day', () => {
     expect(second.body.nextCursor).toBeNull();
     const open = await plant.house.call(plant.planner, listCuttingDays, { query: { state: 'open' } });
     expect(open.body.items.map((day) => day.state)).toEqual(['open']);
-    // A buyer looked at a day and ordered nothing.
+    // A buyer asked for a day and ordered nothing in the end.
     await inTransaction(plant.house.database, plant.market.pubBuyer, (tx) =>
       cuttingDayPort.isClosed(tx, '2026-12-22' as PlantDate),
     );
@@ -167,6 +166,19 @@ describe('a cutting day', () => {
     expect(all.body.items.map((day) => day.deliveryDay)).toEqual(['2026-12-08', '2026-12-03']);
     const bad = await plant.house.call(plant.planner, listCuttingDays, { query: { cursor: 'nonsense' } });
     expect(bad.status).toBe(422);
+  });
+
+  it('is only looked at when buyers ask which days are closed: nothing is made or locked', async () => {
+    const { database } = plant.house;
+    const asked = [DELIVERY_DAY, '2026-12-08', '2026-12-23'] as PlantDate[];
+    const closed = await inTransaction(database, plant.planner, async (tx) => {
+      await lockDay(tx, DELIVERY_DAY as PlantDate);
+      return inTransaction(database, plant.market.pubBuyer, (other) => cuttingDayPort.closedDays(other, asked));
+    });
+    expect([...closed]).toEqual([DELIVERY_DAY]);
+    expect((await plant.house.call(plant.planner, getCuttingDay, params('2026-12-23'))).status).toBe(404);
+    const none = await inTransaction(database, plant.market.pubBuyer, (tx) => cuttingDayPort.closedDays(tx, []));
+    expect(none.size).toBe(0);
   });
 
   it('is cut before a closure of the plant', async () => {
@@ -251,14 +263,3 @@ describe('closing while orders are placed', () => {
     expect((await plant.house.call(plant.planner, getCuttingDay, params(day))).body.orders).toBe(4);
   });
 });
-
-/** Resolves once another connection waits for a lock. */
-async function waitForLock(tx: Parameters<typeof lockDay>[0]): Promise<void> {
-  for (let tries = 0; tries < 500; tries++) {
-    const { rows } = await sql<{ waiting: number }>`
-      select count(*) as waiting from pg_locks
-      where not granted and pid in (select pid from pg_stat_activity where datname = current_database())`.execute(tx);
-    if ((rows[0]?.waiting ?? 0) > 0) return;
-  }
-  throw new Error('Nobody waited for a lock');
-}

@@ -1,8 +1,8 @@
 import { conflict, emit, personOf, stale, type Caller, type Tx } from '@seamwright/shared/server';
 import { unwrap, type PlantDate } from '@seamwright/shared/util';
-import { releaseOrdersOfDay } from '@seamwright/ordering/server';
+import { countUnpackedOfDay, releaseOrdersOfDay } from '@seamwright/ordering/server';
 import { cuttingDayStates, type CuttingDay } from '@seamwright/plant/domain';
-import { countUnpacked, lockDay, saveDay } from './cutting-days.repository';
+import { lockDay, saveDay } from './cutting-days.repository';
 
 interface Moving {
   readonly now: Date;
@@ -55,7 +55,7 @@ export async function finishDay(tx: Tx, moving: Moving): Promise<void> {
   const { now, deliveryDay } = moving;
   const day = await lockedDay(tx, moving);
   const state = unwrap(cuttingDayStates.next(day.state, 'finish'));
-  const orders = await countUnpacked(tx, deliveryDay);
+  const orders = await countUnpackedOfDay(tx, deliveryDay);
   if (orders > 0) throw conflict('day-not-packed', { orders });
   await saveDay(tx, day, { state, finishedAt: now });
   await tell(tx, now, day);

@@ -1,5 +1,5 @@
 import type { OrderWithLines } from '@seamwright/ordering/domain';
-import { markPacked, markShort, orderById } from '@seamwright/ordering/server';
+import { lockOrder, markPacked, markShort, orderById } from '@seamwright/ordering/server';
 import { roomForPack } from '@seamwright/plant/domain';
 import { conflict, notFound, type Caller, type Tx } from '@seamwright/shared/server';
 import { RefusalError, unwrap } from '@seamwright/shared/util';
@@ -22,8 +22,7 @@ async function orderAtTheScale(tx: Tx, orderId: string): Promise<OrderWithLines>
   const { deliveryDay } = await orderById(tx, orderId);
   const day = await sharedDay(tx, deliveryDay);
   if (day?.state !== 'released') throw conflict('day-not-on-floor', { state: day?.state ?? 'open' });
-  await tx.selectFrom('orders').select('id').where('id', '=', orderId).forUpdate().executeTakeFirst();
-  const order = await orderById(tx, orderId);
+  const order = await lockOrder(tx, orderId);
   if (!order.releasedAt || order.cancelledAt) throw conflict('order-not-released', { number: order.number });
   if (order.packedAt) throw conflict('order-packed-already', { number: order.number });
   return order;

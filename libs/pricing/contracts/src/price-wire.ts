@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import * as z from 'zod';
 import { chosenWire } from '@seamwright/catalogue/contracts';
 import { CANDIDATE_OUTCOMES, PRICE_BASES, PRICE_LEVELS } from '@seamwright/pricing/domain';
 import { gramsWire, line, minor, plantDay } from '@seamwright/shared/contracts';

@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import * as z from 'zod';
 import { currency, defineEndpoint, id, line, ownCustomer, plantDay } from '@seamwright/shared/contracts';
 import { chosenValues, lineAmountsWire, lineWeights, priceAnswer, quantityWire } from './price-wire';
 

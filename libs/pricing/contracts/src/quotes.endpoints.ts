@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import * as z from 'zod';
 import { QUOTE_STATES } from '@seamwright/pricing/domain';
 import {
   currency,

@@ -1,7 +1,6 @@
 import { id, plantDay } from '@seamwright/shared/contracts';
-import { readCursor } from '@seamwright/shared/server';
-import { RefusalError } from '@seamwright/shared/util';
-import { z } from 'zod';
+import { readCursor, type CursorValues } from '@seamwright/shared/server';
+import * as z from 'zod';
 
 /** Where a page of quotes ends: the number of the last one. */
 const quotePlace = z.tuple([z.int().positive()]);
@@ -10,16 +9,11 @@ const listPlace = z.tuple([z.int(), z.string(), id]);
 /** Where a page of price lines ends: code, first day and id. */
 const linePlace = z.tuple([z.string(), plantDay, id]);
 
-/** Reads a cursor back; one that was not written for this list is refused, whatever stands in it. */
 const placeOf =
-  <T extends readonly unknown[]>(place: z.ZodType<T>, length: number) =>
-  (cursor: string | undefined): T | null => {
-    if (cursor === undefined) return null;
-    const read = place.safeParse(readCursor(cursor, length));
-    if (!read.success) throw new RefusalError({ code: 'invalid', params: {}, pointer: '/cursor' });
-    return read.data;
-  };
+  <T extends CursorValues>(place: z.ZodType<T>) =>
+  (cursor: string | undefined): T | null =>
+    cursor === undefined ? null : readCursor(cursor, place);
 
-export const readQuotePlace = placeOf(quotePlace, 1);
-export const readListPlace = placeOf(listPlace, 3);
-export const readLinePlace = placeOf(linePlace, 3);
+export const readQuotePlace = placeOf(quotePlace);
+export const readListPlace = placeOf(listPlace);
+export const readLinePlace = placeOf(linePlace);

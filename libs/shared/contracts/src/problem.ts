@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import * as z from 'zod';
 
 /** An RFC 9457 problem document. `code` is the refusal's stable name; `errors` point at fields by JSON pointer. */
 export const problem = z.object({

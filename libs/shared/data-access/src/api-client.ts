@@ -10,11 +10,14 @@ import {
 import { inject, Injectable } from '@angular/core';
 import {
   catchError,
+  defer,
+  distinctUntilChanged,
   filter,
   finalize,
   from,
   map,
   merge,
+  scan,
   Subject,
   switchMap,
   tap,
@@ -66,12 +69,20 @@ export class ApiClient {
 
   /** Sends a file, telling the percentage that is on its way before the answer. */
   upload<E extends AnyEndpoint>(endpoint: E, input: CallInput<E>): Observable<UploadStep<E>> {
-    const progress = new Subject<number>();
-    const answer = this.#send(endpoint, input as Sent, 'json', progress).pipe(
-      map((response): UploadStep<E> => ({ percent: 100, answer: response.body as Answer<E> })),
-      finalize(() => progress.complete()),
-    );
-    return merge(progress.pipe(map((percent): UploadStep<E> => ({ percent, answer: null }))), answer);
+    return defer(() => {
+      const progress = new Subject<number>();
+      const answer = this.#send(endpoint, input as Sent, 'json', progress).pipe(
+        map((response): UploadStep<E> => ({ percent: 100, answer: response.body as Answer<E> })),
+        finalize(() => progress.complete()),
+      );
+      const steps = progress.pipe(
+        // Sent anew under a renewed token it starts from nothing, which would only look like a fault.
+        scan((most, percent) => Math.max(most, percent)),
+        distinctUntilChanged(),
+        map((percent): UploadStep<E> => ({ percent, answer: null })),
+      );
+      return merge(steps, answer);
+    });
   }
 
   #send(
@@ -161,6 +172,7 @@ function fileNameOf(response: HttpResponse<unknown>): string {
 async function readBlobError(error: unknown): Promise<unknown> {
   if (!(error instanceof HttpErrorResponse) || !(error.error instanceof Blob)) return error;
   const { headers, status, statusText, url } = error;
-  const text = await new Response(error.error).text();
+  // What can't be read is as good as nothing.
+  const text = await error.error.text().catch(() => '');
   return new HttpErrorResponse({ error: text, headers, status, statusText, url: url ?? undefined });
 }

@@ -8,25 +8,49 @@ export async function* readServerSentEvents(body: ReadableStream<Uint8Array>): A
   const reader = body.getReader();
   const decoder = new TextDecoder();
   let waiting = '';
-  for (;;) {
-    const { done, value } = await reader.read();
-    if (done) return;
-    waiting += decoder.decode(value, { stream: true });
-    const blocks = waiting.split('\n\n');
-    waiting = blocks.pop() ?? '';
-    for (const block of blocks) {
-      const event = readBlock(block);
-      if (event) yield event;
+  let lines: string[] = [];
+  try {
+    for (;;) {
+      const { done, value } = await reader.read();
+      // What was not ended by an empty line is no event.
+      if (done) return;
+      const read = splitLines(waiting + decoder.decode(value, { stream: true }));
+      waiting = read.rest;
+      for (const line of read.lines) {
+        if (line !== '') {
+          lines.push(line);
+          continue;
+        }
+        const event = readBlock(lines);
+        lines = [];
+        if (event) yield event;
+      }
     }
+  } finally {
+    await reader.cancel().catch(() => undefined);
   }
 }
 
-function readBlock(block: string): ServerSentEvent | null {
-  let name = 'message';
+/** A line ends with CR LF, LF or CR; a CR at the very end may be half of the first. */
+function splitLines(text: string): { readonly lines: string[]; readonly rest: string } {
+  const lines = text.split(/\r\n|\n|\r(?!$)/);
+  return { rest: lines.pop() ?? '', lines };
+}
+
+function readBlock(lines: readonly string[]): ServerSentEvent | null {
+  let name = '';
   const data: string[] = [];
-  for (const line of block.split('\n')) {
-    if (line.startsWith('event:')) name = line.slice(6).trim();
-    else if (line.startsWith('data:')) data.push(line.slice(5).trimStart());
+  for (const line of lines) {
+    const { field, value } = readLine(line);
+    if (field === 'event') name = value;
+    if (field === 'data') data.push(value);
   }
-  return data.length > 0 ? { name, data: data.join('\n') } : null;
+  return data.length > 0 ? { name: name || 'message', data: data.join('\n') } : null;
+}
+
+/** One space after the colon belongs to neither; a comment has no field's name. */
+function readLine(line: string): { readonly field: string; readonly value: string } {
+  const colon = line.indexOf(':');
+  if (colon < 0) return { field: line, value: '' };
+  return { field: line.slice(0, colon), value: line.slice(colon + 1).replace(/^ /, '') };
 }

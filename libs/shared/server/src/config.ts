@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import * as z from 'zod';
 
 const port = z.coerce.number().int().min(0).max(65535);
 
@@ -19,6 +19,14 @@ const settings = z.object({
   STRIPE_HOST: z.string().optional(),
   STRIPE_PORT: port.optional(),
   STRIPE_PROTOCOL: z.enum(['http', 'https']).default('https'),
+  /** The processor's tariff, to check its fees by. */
+  CARD_FEE_PPM: z.coerce.number().int().nonnegative().optional(),
+  CARD_FEE_FIXED_MINOR: z.coerce.number().int().nonnegative().default(0),
+  /** Who writes the invoices; lines of an address are parted by a bar. */
+  SELLER_NAME: z.string().min(1),
+  SELLER_ADDRESS: z.string().min(1),
+  SELLER_VAT_NUMBER: z.string().default(''),
+  SELLER_BANK_DETAILS: z.string().min(1),
   SMTP_URL: z.string().min(1),
   MAIL_FROM: z.string().default('Seamwright <desk@seamwright.example>'),
   PLANT_TIME_ZONE: z.string().default('Europe/London'),

@@ -1,9 +1,9 @@
 export { MovableClock, SetClock, systemClock, type Clock } from './clock';
 export { readConfig, type Config } from './config';
-export { anonymous, personOf, rolesOf, system, type Caller, type SystemPurpose } from './database/caller';
+export { anonymous, customersOf, personOf, rolesOf, system, type Caller, type SystemPurpose } from './database/caller';
 export { openDatabase, type Database } from './database/database';
 export { inTransaction, type Tx } from './database/in-transaction';
-export { pageFrom, readCursor, writeCursor } from './database/paging';
+export { pageFrom, readCursor, writeCursor, type CursorValues } from './database/paging';
 export { violates } from './database/violations';
 export { documentById, storeDocument, type NewDocument } from './documents/documents';
 export { apiRouter, problemHandler, type ApiDependencies } from './http/api-router';

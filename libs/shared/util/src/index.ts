@@ -4,6 +4,7 @@ export { currencyCode, currencyCodes, minorDigits, type CurrencyCode } from './c
 export { addMoney, minorUnits, priceForGrams, priceTimes, sumMoney, taxOn, type MinorUnits } from './money';
 export { formatMoney, parseMoney } from './money-text';
 export { shareByLargestRemainder } from './largest-remainder';
+export { UNIT_SPACE } from './unit-space';
 export { formatPercent, multiplyPpm, ppm, type Ppm } from './ppm';
 export {
   addFractions,

@@ -24,12 +24,12 @@ describe('a rate over 1,000,000', () => {
   });
 
   it('is written in per cent, with the digits it has or those asked for', () => {
-    expect(formatPercent(ppm(605_000))).toBe('60.5%');
-    expect(formatPercent(ppm(1_000_000))).toBe('100%');
-    expect(formatPercent(ppm(1))).toBe('0.0001%');
-    expect(formatPercent(ppm(-12_345))).toBe('-1.2345%');
-    expect(formatPercent(ppm(605_000), 'en-GB', 2)).toBe('60.50%');
-    expect(formatPercent(ppm(605_500), 'en-GB', 1)).toBe('60.6%');
+    expect(formatPercent(ppm(605_000))).toBe('60.5\u00a0%');
+    expect(formatPercent(ppm(1_000_000))).toBe('100\u00a0%');
+    expect(formatPercent(ppm(1))).toBe('0.0001\u00a0%');
+    expect(formatPercent(ppm(-12_345))).toBe('-1.2345\u00a0%');
+    expect(formatPercent(ppm(605_000), 'en-GB', 2)).toBe('60.50\u00a0%');
+    expect(formatPercent(ppm(605_500), 'en-GB', 1)).toBe('60.6\u00a0%');
     expect(formatPercent(ppm(605_000), 'de-DE')).toBe('60,5\u00a0%');
   });
 });

@@ -1,6 +1,7 @@
 import { toDecimalText } from './decimal-text';
 import { numberFormat } from './number-format';
 import { divideRounded, toSafeNumber, type Rounding } from './rounding';
+import { UNIT_SPACE } from './unit-space';
 import { wholeNumber } from './whole-number';
 
 /** A yield, rate or margin as a whole number over 1,000,000: 0.605 = 605,000. */
@@ -16,11 +17,15 @@ export function multiplyPpm(whole: number, rate: Ppm, rounding: Rounding): numbe
   return toSafeNumber(divideRounded(BigInt(whole) * BigInt(rate), 1_000_000n, rounding));
 }
 
-/** The rate in per cent: 605,000 → "60.5%". Shows what digits it has, or as many as `decimals` says. */
+/** The rate in per cent: 605,000 → "60.5 %". Shows what digits it has, or as many as `decimals` says. */
 export function formatPercent(rate: Ppm, locale = 'en-GB', decimals?: number): string {
-  return numberFormat(locale, {
+  const parts = numberFormat(locale, {
     style: 'percent',
     minimumFractionDigits: decimals ?? 0,
     maximumFractionDigits: decimals ?? 4,
-  }).format(toDecimalText(BigInt(rate), 6));
+  }).formatToParts(toDecimalText(BigInt(rate), 6));
+  // English sets the sign tight against the digits; every other unit of the house stands apart, and so does this one.
+  const isTight = (at: number): boolean =>
+    parts[at]?.type === 'percentSign' && ['integer', 'fraction'].includes(parts[at - 1]?.type ?? '');
+  return parts.map(({ value }, at) => (isTight(at) ? `${UNIT_SPACE}${value}` : value)).join('');
 }

@@ -3,12 +3,12 @@ import { grams } from './weight';
 import { formatKg, formatKgWithUnit, parseKg } from './weight-text';
 
 describe('writing a weight', () => {
-  it('shows three decimals, and the unit after a thin space', () => {
+  it('shows three decimals, and the unit after a space that never breaks', () => {
     expect(formatKg(grams(12_480))).toBe('12.480');
     expect(formatKg(grams(5))).toBe('0.005');
     expect(formatKg(grams(-1_234_500))).toBe('-1,234.500');
     expect(formatKg(grams(12_480), 'de-DE')).toBe('12,480');
-    expect(formatKgWithUnit(grams(12_480))).toBe('12.480\u2009kg');
+    expect(formatKgWithUnit(grams(12_480))).toBe('12.480\u00a0kg');
     expect(formatKg(grams(9007199254740991))).toBe('9,007,199,254,740.991');
   });
 });
@@ -20,6 +20,7 @@ describe('reading a weight', () => {
     ['12,480', 12_480],
     ['12.480 kg', 12_480],
     ['12.480\u2009kg', 12_480],
+    ['12.480\u00a0kg', 12_480],
     ['1,234.5', 1_234_500],
     ['1.234,5', 1_234_500],
     ['12', 12_000],

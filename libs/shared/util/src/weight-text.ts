@@ -1,9 +1,8 @@
 import { readDecimal, toDecimalText } from './decimal-text';
 import { numberFormat } from './number-format';
 import { ok, refuse, type Result } from './result';
+import { UNIT_SPACE } from './unit-space';
 import { grams, type Grams } from './weight';
-
-const THIN_SPACE = '\u2009';
 
 /** Kilograms with three decimals, without the unit: 12480 → "12.480". For columns headed "kg". */
 export function formatKg(weight: Grams, locale = 'en-GB'): string {
@@ -12,9 +11,9 @@ export function formatKg(weight: Grams, locale = 'en-GB'): string {
   );
 }
 
-/** Kilograms with three decimals, a thin space and the unit: 12480 → "12.480 kg". */
+/** Kilograms with three decimals, a space that never breaks and the unit: 12480 → "12.480 kg". */
 export function formatKgWithUnit(weight: Grams, locale = 'en-GB'): string {
-  return `${formatKg(weight, locale)}${THIN_SPACE}kg`;
+  return `${formatKg(weight, locale)}${UNIT_SPACE}kg`;
 }
 
 /**

@@ -1,3 +1,5 @@
+import * as z from 'zod';
+import { plantDay } from '@seamwright/shared/contracts';
 import {
   implement,
   implementOnce,
@@ -21,10 +23,13 @@ export interface StockParts {
   readonly timeZone: string;
 }
 
+/** Where a page of lots ends: the use-by day, `infinity` without one, and the code. */
+const lotPlace = z.tuple([z.union([plantDay, z.literal('infinity')]), z.string()]);
+
 export const stockImplementations = ({ timeZone }: StockParts): Implementation[] => [
   implement(lots.listLots, ({ database, caller }, { query: { cursor, limit, state, nodeId } }) =>
     inTransaction(database, caller, async (tx) => {
-      const [useBy, code] = cursor ? readCursor(cursor, 2).map(String) : [];
+      const [useBy, code] = cursor ? readCursor(cursor, lotPlace) : [];
       const after = useBy !== undefined && code !== undefined ? { useBy, code } : undefined;
       return pageFrom(await listLots(tx, { state, nodeId, after, limit }), limit, lotCursor, present);
     }),

@@ -1,6 +1,7 @@
 import {
   afterNextRender,
   ChangeDetectionStrategy,
+  ChangeDetectorRef,
   Component,
   computed,
   DestroyRef,
@@ -10,6 +11,7 @@ import {
   signal,
 } from '@angular/core';
 import { specDrawing, type DrawnNumbers, type Measure } from '@seamwright/catalogue/domain';
+import { UNIT_SPACE } from '@seamwright/shared/util';
 import { weightText } from '../weight-words';
 import { drawingText, scaleText, viewName } from './drawing-words';
 import { pathOf } from './path';
@@ -20,6 +22,10 @@ const TEXT_PX = 13;
 /** Narrower than this nothing could be read; wider, a piece would not fill it. */
 const NARROWEST_MM = 80;
 const WIDEST_MM = 230;
+/** Taller than this, what is to be chosen and bought would lie far below the picture. */
+const TALLEST_MM = 68;
+/** What every usual sheet has between its margins: wider, it would be shrunk and its scale be false. */
+const PAPER_MM = 170;
 
 /**
  * The to-scale drawing of a piece from its numbers. It is drawn in true millimetres for the width there is, so that
@@ -29,16 +35,25 @@ const WIDEST_MM = 230;
   selector: 'sw-spec-drawing',
   templateUrl: './spec-drawing.html',
   styleUrl: './spec-drawing.scss',
+  host: { '(window:beforeprint)': 'redraw(true)', '(window:afterprint)': 'redraw(false)' },
   changeDetection: ChangeDetectionStrategy.OnPush,
 })
 export class SpecDrawing {
   readonly numbers = input.required<DrawnNumbers>();
 
   private readonly widthPx = signal(720);
+  private readonly printing = signal(false);
+  private readonly changes = inject(ChangeDetectorRef);
 
   protected readonly drawing = computed(() => {
-    const widthMm = Math.min(WIDEST_MM, Math.max(NARROWEST_MM, this.widthPx() / PX_PER_MM));
-    return specDrawing(this.numbers(), { widthMm, heightMm: widthMm * 0.55, textMm: TEXT_PX / PX_PER_MM });
+    const widthMm = this.printing()
+      ? PAPER_MM
+      : Math.min(WIDEST_MM, Math.max(NARROWEST_MM, this.widthPx() / PX_PER_MM));
+    return specDrawing(this.numbers(), {
+      widthMm,
+      heightMm: Math.min(widthMm * 0.55, TALLEST_MM),
+      textMm: TEXT_PX / PX_PER_MM,
+    });
   });
   protected readonly viewBox = computed(() => `0 0 ${this.drawing().widthMm} ${this.drawing().heightMm}`);
   protected readonly shapes = computed(() =>
@@ -67,6 +82,12 @@ export class SpecDrawing {
       destroyed.onDestroy(() => observer.disconnect());
     });
   }
+
+  /** Draws it for paper, or for the screen again: at once, for the browser takes the page as it then stands. */
+  protected redraw(printing: boolean): void {
+    this.printing.set(printing);
+    this.changes.detectChanges();
+  }
 }
 
 /** A measured line with short strokes across both ends. */
@@ -82,5 +103,5 @@ function drawnMeasure({ mm, from, to, text, anchor }: Measure) {
       false,
     ),
   );
-  return { path: `${pathOf([from, to], false)}${across.join('')}`, words: `${mm}\u2009mm`, text, anchor };
+  return { path: `${pathOf([from, to], false)}${across.join('')}`, words: `${mm}${UNIT_SPACE}mm`, text, anchor };
 }

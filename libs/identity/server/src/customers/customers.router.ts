@@ -9,6 +9,7 @@ import {
   type Implementation,
 } from '@seamwright/shared/server';
 import { RefusalError } from '@seamwright/shared/util';
+import { namePlace } from '../name-place';
 import type { IdentityParts } from '../identity-parts';
 import { endSessionsOfCustomer } from '../session/sessions.repository';
 import {
@@ -25,7 +26,7 @@ import { addSite, changeSite, siteById, siteByItsId, sitesOf } from './sites.rep
 
 export const customersRouter = (parts: IdentityParts): Implementation[] => [
   implement(contracts.listCustomers, async ({ database, caller }, { query: { cursor, limit, q, kind } }) => {
-    const after = cursor ? (readCursor(cursor, 2) as [string, string]) : null;
+    const after = cursor ? readCursor(cursor, namePlace) : null;
     const rows = await inTransaction(database, caller, (tx) => customersPage(tx, { q, kind, after, limit }));
     return pageFrom(rows, limit, ({ sortName, id }) => [sortName, id], customerOf);
   }),

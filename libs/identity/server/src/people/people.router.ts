@@ -8,6 +8,7 @@ import {
   rolesOf,
   type Implementation,
 } from '@seamwright/shared/server';
+import { namePlace } from '../name-place';
 import type { IdentityParts } from '../identity-parts';
 import { changePerson, endSessionsOfPerson } from './change-person';
 import { inviteAgain, invitePerson } from './invite-person';
@@ -17,7 +18,7 @@ import { personLookedAfter } from './steward';
 
 export const peopleRouter = (parts: IdentityParts): Implementation[] => [
   implement(contracts.listPeople, async ({ database, caller }, { query: { cursor, limit, customerId, who, q } }) => {
-    const after = cursor ? (readCursor(cursor, 2) as [string, string]) : null;
+    const after = cursor ? readCursor(cursor, namePlace) : null;
     // Only administrators look after staff; a rep's list is of buyers.
     const shown = rolesOf(caller).includes('admin') ? who : 'buyers';
     const rows = await inTransaction(database, caller, (tx) =>

@@ -1,6 +1,6 @@
 import { createHash } from 'node:crypto';
 import { sign } from 'jsonwebtoken';
-import { z } from 'zod';
+import * as z from 'zod';
 import { id, ROLES } from '@seamwright/shared/contracts';
 import type { Caller } from '@seamwright/shared/server';
 import type { SignedInPerson } from '../people/signed-in-person';

@@ -19,6 +19,7 @@ export const OrderPageActions = createActionGroup({
   events: {
     Opened: props<{ orderId: string }>(),
     'Cancel Pressed': props<{ orderId: string; rowVersion: number; reason: string }>(),
+    'Other Card Chosen': props<{ orderId: string; rowVersion: number; cardId: string }>(),
   },
 });
 
@@ -31,6 +32,9 @@ export const OrdersApiActions = createActionGroup({
     Failed: props<{ problem: Problem }>(),
     Cancelled: props<{ order: OrderDetail }>(),
     'Cancel Failed': props<{ problem: Problem }>(),
+    /** The other card was asked; the order says whether it is held. */
+    'Card Asked': props<{ order: OrderDetail }>(),
+    'Card Failed': props<{ problem: Problem }>(),
   },
 });
 

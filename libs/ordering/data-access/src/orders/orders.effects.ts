@@ -3,7 +3,7 @@ import { Actions, createEffect, ofType } from '@ngrx/effects';
 import { concatLatestFrom } from '@ngrx/operators';
 import { Store } from '@ngrx/store';
 import { auditTime, catchError, exhaustMap, filter, map, of, switchMap } from 'rxjs';
-import { cancelOrder, getOrder, listOrders } from '@seamwright/ordering/contracts';
+import { cancelOrder, getOrder, listOrders, payOrderWith } from '@seamwright/ordering/contracts';
 import { ApiClient, asProblem, LiveEvents } from '@seamwright/shared/data-access';
 import {
   OrderListPageActions,
@@ -78,6 +78,20 @@ const cancel = createEffect(
   { functional: true },
 );
 
+const payWith = createEffect(
+  (actions = inject(Actions), api = inject(ApiClient)) =>
+    actions.pipe(
+      ofType(OrderPageActions.otherCardChosen),
+      exhaustMap(({ orderId, rowVersion: ifMatch, cardId }) =>
+        api.call(payOrderWith, { params: { orderId }, ifMatch, body: { cardId } }).pipe(
+          map((order) => OrdersApiActions.cardAsked({ order })),
+          catchError((error: unknown) => of(OrdersApiActions.cardFailed({ problem: asProblem(error) }))),
+        ),
+      ),
+    ),
+  { functional: true },
+);
+
 const hearChanges = createEffect(
   (live = inject(LiveEvents)) =>
     live
@@ -102,7 +116,7 @@ const refreshOrder = createEffect(
 const refreshList = createEffect(
   (actions = inject(Actions), store = inject(Store), api = inject(ApiClient)) =>
     actions.pipe(
-      ofType(OrdersLiveActions.changed, OrdersApiActions.cancelled),
+      ofType(OrdersLiveActions.changed, OrdersApiActions.cancelled, OrdersApiActions.cardAsked),
       auditTime(GATHER_MS),
       concatLatestFrom(() => [store.select(ordersFeature.selectList), store.select(ordersFeature.selectSearch)]),
       filter(([, list]) => list.status !== 'idle'),
@@ -111,4 +125,4 @@ const refreshList = createEffect(
   { functional: true },
 );
 
-export const ordersEffects = { loadList, loadMore, loadOrder, cancel, hearChanges, refreshOrder, refreshList };
+export const ordersEffects = { loadList, loadMore, loadOrder, cancel, payWith, hearChanges, refreshOrder, refreshList };

@@ -10,10 +10,18 @@ export interface OrdersState {
   readonly nextCursor: string | null;
   readonly orderId: string | null;
   readonly order: Remote<OrderDetail>;
-  readonly cancelling: { readonly running: boolean; readonly problem: Problem | null };
+  readonly cancelling: Deed;
+  /** Another card is being asked to be held. */
+  readonly paying: Deed;
 }
 
-const still = { running: false, problem: null };
+interface Deed {
+  readonly running: boolean;
+  readonly problem: Problem | null;
+}
+
+const still: Deed = { running: false, problem: null };
+const running: Deed = { running: true, problem: null };
 
 const initial: OrdersState = {
   search: { deliveryDay: null, state: null, customerId: null },
@@ -22,6 +30,7 @@ const initial: OrdersState = {
   orderId: null,
   order: idle(),
   cancelling: still,
+  paying: still,
 };
 
 const same = (one: OrderSearch, other: OrderSearch): boolean =>
@@ -53,6 +62,7 @@ export const ordersFeature = createFeature({
       orderId,
       order: loading(state.orderId === orderId ? state.order : idle()),
       cancelling: still,
+      paying: still,
     })),
     on(OrdersApiActions.loaded, (state, { order }): OrdersState =>
       order.id === state.orderId ? { ...state, order: loaded(order) } : state,
@@ -63,7 +73,7 @@ export const ordersFeature = createFeature({
     })),
     on(OrderPageActions.cancelPressed, (state): OrdersState => ({
       ...state,
-      cancelling: { running: true, problem: null },
+      cancelling: running,
     })),
     on(OrdersApiActions.cancelled, (state, { order }): OrdersState => ({
       ...state,
@@ -73,6 +83,16 @@ export const ordersFeature = createFeature({
     on(OrdersApiActions.cancelFailed, (state, { problem }): OrdersState => ({
       ...state,
       cancelling: { running: false, problem },
+    })),
+    on(OrderPageActions.otherCardChosen, (state): OrdersState => ({ ...state, paying: running })),
+    on(OrdersApiActions.cardAsked, (state, { order }): OrdersState => ({
+      ...state,
+      order: order.id === state.orderId ? loaded(order) : state.order,
+      paying: still,
+    })),
+    on(OrdersApiActions.cardFailed, (state, { problem }): OrdersState => ({
+      ...state,
+      paying: { running: false, problem },
     })),
   ),
   extraSelectors: ({ selectNextCursor }) => ({

@@ -6,6 +6,7 @@ import {
   cancelOrder,
   getOrder,
   listOrders,
+  payOrderWith,
   type OrderDetail,
   type OrderListItem,
 } from '@seamwright/ordering/contracts';
@@ -33,6 +34,7 @@ beforeEach(() => {
     [listOrders.id]: () => of({ items: [item('a'), item('b')], nextCursor: 'next' }),
     [getOrder.id]: () => of(detail('a')),
     [cancelOrder.id]: () => of(detail('a', 2)),
+    [payOrderWith.id]: () => of(detail('a', 3)),
   };
   const call = (endpoint: { id: string }, input: Record<string, unknown>) => {
     calls.push({ id: endpoint.id, input });
@@ -91,6 +93,32 @@ describe('an open order', () => {
     store.dispatch(OrderPageActions.cancelPressed({ orderId: 'a', rowVersion: 1, reason: 'no cover' }));
     expect(ofEndpoint(cancelOrder)).toEqual([{ params: { orderId: 'a' }, ifMatch: 1, body: { reason: 'no cover' } }]);
     expect(state().order.data?.rowVersion).toBe(2);
+  });
+
+  it('has another card asked once, at the version that was read', () => {
+    const answer = new Subject<OrderDetail>();
+    answers[payOrderWith.id] = () => answer;
+    store.dispatch(OrderPageActions.opened({ orderId: 'a' }));
+    const chosen = OrderPageActions.otherCardChosen({ orderId: 'a', rowVersion: 1, cardId: 'visa' });
+    store.dispatch(chosen);
+    store.dispatch(chosen);
+    expect(ofEndpoint(payOrderWith)).toEqual([{ params: { orderId: 'a' }, ifMatch: 1, body: { cardId: 'visa' } }]);
+    expect(state().paying).toEqual({ running: true, problem: null });
+    answer.next(detail('a', 3));
+    answer.complete();
+    expect(state()).toMatchObject({ paying: { running: false }, order: { data: { rowVersion: 3 } } });
+  });
+
+  it('says why another card was not asked, until the order is opened again', () => {
+    answers[payOrderWith.id] = () => throwError(() => stale);
+    store.dispatch(OrderPageActions.opened({ orderId: 'a' }));
+    store.dispatch(OrderPageActions.otherCardChosen({ orderId: 'a', rowVersion: 1, cardId: 'visa' }));
+    expect(state()).toMatchObject({
+      paying: { running: false, problem: { code: 'stale' } },
+      order: { data: { id: 'a' } },
+    });
+    store.dispatch(OrderPageActions.opened({ orderId: 'a' }));
+    expect(state().paying.problem).toBeNull();
   });
 
   it('says when somebody was faster, and keeps what is shown', () => {

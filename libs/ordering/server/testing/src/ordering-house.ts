@@ -1,9 +1,10 @@
 import { openTestHouse, type TestHouse } from '@seamwright/shared/server/testing';
-import { orderingImplementations, orderingSubscribers, type DayPort } from '../../src';
+import { orderingImplementations, orderingSubscribers, type DayPort, type OrderingParts } from '../../src';
 import { FakeCards } from './fake-cards';
 import { addTestTrade, type TestTrade } from './test-trade';
 
 export interface OrderingHouse extends TestHouse, TestTrade {
+  readonly parts: Omit<OrderingParts, 'clock'>;
   readonly cards: FakeCards;
   /** Days that take no more orders. */
   readonly closedDays: Set<string>;
@@ -12,12 +13,16 @@ export interface OrderingHouse extends TestHouse, TestTrade {
 /** A test house with customers, specifications, prices and a card keeper that stands in for the real one. */
 export async function openOrderingHouse(): Promise<OrderingHouse> {
   const closedDays = new Set<string>();
-  const days: DayPort = { isClosed: async (_tx, day) => closedDays.has(day) };
+  const days: DayPort = {
+    isClosed: async (_tx, day) => closedDays.has(day),
+    closedDays: async (_tx, asked) => new Set(asked.filter((day) => closedDays.has(day))),
+  };
   const cards = new FakeCards();
+  const parts = { timeZone: 'Europe/London', cards, days };
   const house = await openTestHouse({
-    implementations: ({ clock }) => orderingImplementations({ timeZone: 'Europe/London', cards, days, clock }),
+    implementations: ({ clock }) => orderingImplementations({ ...parts, clock }),
     subscribers: orderingSubscribers({ cards }),
   });
   const trade = await addTestTrade(house.database, new Date('2026-11-02T09:00:00Z'));
-  return { ...house, ...trade, cards, closedDays };
+  return { ...house, ...trade, parts, cards, closedDays };
 }

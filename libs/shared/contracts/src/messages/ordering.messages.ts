@@ -27,6 +27,11 @@ export const orderingMessages = {
   'quantity-too-large': (p) => $localize`The quantity can be at most ${p['most']}:most:.`,
   'card-missing': () => $localize`Choose the card to pay with.`,
   'card-not-wanted': () => $localize`An order on account takes no card.`,
+  'order-waits-for-no-card': (p) => $localize`This order waits for no card: it is ${p['stage']}:stage:.`,
+  'card-still-asked': () =>
+    $localize`The bank has not settled the last card yet. Wait a moment, then try another one if it is declined.`,
+  'too-late-to-confirm': (p) =>
+    $localize`The list for ${p['day']}:day: is closed, so order ${p['number']}:number: can't be confirmed any more. Ring the desk.`,
   'price-moved': (p) =>
     $localize`Prices have changed: this can now come to ${money(p['now'])}:now:, you were shown at most ${money(p['shown'])}:shown:. Look at the new prices and place it again. Nothing was ordered.`,
   'order-settled': (p) => $localize`This order can't be changed any more: it is ${p['stage']}:stage:.`,

@@ -30,6 +30,20 @@ export const personOf = (caller: Caller): string | null =>
 export const rolesOf = (caller: Caller): readonly Role[] =>
   caller.kind === 'user' || caller.kind === 'staff' ? caller.roles : [];
 
+/** The customers that a caller serves. */
+export function customersOf(caller: Caller): '*' | readonly string[] {
+  switch (caller.kind) {
+    case 'anonymous':
+      return [];
+    case 'user':
+      return [caller.customerId];
+    case 'staff':
+      return caller.customers;
+    case 'system':
+      return '*';
+  }
+}
+
 const list = (ids: '*' | readonly string[]): string => (ids === '*' ? '*' : `{${ids.join(',')}}`);
 
 /** The transaction's settings that the policies read (migration 0001). */

@@ -1,3 +1,4 @@
+import type * as z from 'zod';
 import { RefusalError } from '@seamwright/shared/util';
 
 /** The values of a row by which the list is ordered, last one unique. */
@@ -7,21 +8,19 @@ export function writeCursor(values: CursorValues): string {
   return Buffer.from(JSON.stringify(values)).toString('base64url');
 }
 
-/** Reads a cursor back; refuses one that was not written here for a list with this many sort values. */
-export function readCursor(cursor: string, length: number): CursorValues {
+/** Reads a cursor back; whatever was not written for a list that is ordered by values of this shape is refused. */
+export function readCursor<T extends CursorValues>(cursor: string, shape: z.ZodType<T>): T {
+  const read = shape.safeParse(parsed(cursor));
+  if (!read.success) throw new RefusalError({ code: 'invalid', params: {}, pointer: '/cursor' });
+  return read.data;
+}
+
+function parsed(cursor: string): unknown {
   try {
-    const values: unknown = JSON.parse(Buffer.from(cursor, 'base64url').toString('utf8'));
-    if (
-      Array.isArray(values) &&
-      values.length === length &&
-      values.every((v) => ['string', 'number'].includes(typeof v))
-    ) {
-      return values as CursorValues;
-    }
+    return JSON.parse(Buffer.from(cursor, 'base64url').toString('utf8'));
   } catch {
-    // Falls through: what can't be read is refused the same way as what has another shape.
+    return null;
   }
-  throw new RefusalError({ code: 'invalid', params: {}, pointer: '/cursor' });
 }
 
 /** Cuts one row more than the page to know whether another page follows. */

@@ -1,5 +1,5 @@
 import request from 'supertest';
-import { z } from 'zod';
+import * as z from 'zod';
 import { anyone, defineEndpoint, id, line, ownCustomer, rowVersion, staffOnly } from '@seamwright/shared/contracts';
 import { newId } from '@seamwright/shared/util';
 import { openTestHouse, TEST_NOW, type TestHouse } from '@seamwright/shared/server/testing';
@@ -247,6 +247,7 @@ describe('the router made from declarations', () => {
       ['another media type', '<name/>', 'application/xml', 415, 'wrong-media-type'],
       ['more than a megabyte', `{"name":"${'x'.repeat(1_100_000)}"}`, 'application/json', 413, 'too-large'],
       ['a list', '[]', 'application/json', 422, 'invalid'],
+      ['a NUL in a name', '{"name":"Lar\\u0000der"}', 'application/json', 422, 'invalid'],
       ['a prototype', '{"__proto__":{"name":"x"},"name":"ok","constructor":1}', 'application/json', 422, 'invalid'],
     ])('answers %s with a clear problem', async (_, body, type, status, code) => {
       const answer = await raw(body, type);

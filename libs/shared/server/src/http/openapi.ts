@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import * as z from 'zod';
 import { PROBLEM_MEDIA_TYPE, problem, type AnyEndpoint } from '@seamwright/shared/contracts';
 
 type JsonObject = Record<string, unknown>;

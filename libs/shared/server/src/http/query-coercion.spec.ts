@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import * as z from 'zod';
 import { coerceQuery } from './query-coercion';
 
 const schema = z.strictObject({

@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import * as z from 'zod';
 
 /** The innermost schema under optional, default and nullable. */
 function core(schema: z.core.$ZodType): z.core.$ZodType {

@@ -90,7 +90,10 @@ describe('the outbox', () => {
 
   describe('mail', () => {
     const sent: { to: string; attachment: unknown }[] = [];
-    const mailer: Mailer = { send: async ({ to, attachment }) => void sent.push({ to, attachment }) };
+    const mailer: Mailer = {
+      send: async ({ to, attachment }) => void sent.push({ to, attachment }),
+      close: () => undefined,
+    };
 
     it('is sent once after the commit, however often it was queued', async () => {
       const queue = () =>

@@ -46,12 +46,16 @@ export interface Mailer {
     text: string;
     attachment: { fileName: string; mediaType: string; bytes: Buffer } | null;
   }): Promise<void>;
+  /** Lets its connections go. */
+  close(): void;
 }
 
 /** Sends by SMTP. The mail's id becomes its Message-ID, so that a repeat can be told. */
 export function smtpMailer(url: string, from: string): Mailer {
-  const transport: Transporter = createTransport(url);
+  // One connection for many mails.
+  const transport: Transporter = createTransport({ url, pool: true, maxConnections: 2 });
   return {
+    close: () => transport.close(),
     async send({ id, to, subject, text, attachment }) {
       await transport.sendMail({
         from,

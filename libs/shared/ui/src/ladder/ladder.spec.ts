@@ -32,9 +32,9 @@ describe('Ladder', () => {
     const ladder = await draw(steaks);
 
     expect([...ladder.querySelectorAll('.rung')].map(words)).toEqual([
-      ['at least', '£150.66', '6.384\u2009kg'],
-      ['most likely', '£158.59', '6.720\u2009kg'],
-      ['at most', '£166.52', '7.056\u2009kg'],
+      ['at least', '£150.66', '6.384\u00a0kg'],
+      ['most likely', '£158.59', '6.720\u00a0kg'],
+      ['at most', '£166.52', '7.056\u00a0kg'],
     ]);
     expect(ladder.querySelector('.real')).toBeNull();
   });
@@ -43,14 +43,14 @@ describe('Ladder', () => {
     const fixed = { grams: 10_000, minor: 9_800 };
     const ladder = await draw({ atLeast: fixed, mostLikely: fixed, atMost: fixed });
 
-    expect([...ladder.querySelectorAll('.rung')].map(words)).toEqual([['exactly', '£98.00', '10.000\u2009kg']]);
+    expect([...ladder.querySelectorAll('.rung')].map(words)).toEqual([['exactly', '£98.00', '10.000\u00a0kg']]);
   });
 
   it('shows what was packed where it lies between the outer knots', async () => {
     const ladder = await draw({ ...steaks, real: { grams: 7_056, minor: 16_652 } });
     const last = [...ladder.querySelectorAll<HTMLElement>('.knot')][1] ?? null;
 
-    expect(ladder.querySelector('.real')?.textContent).toContain('7.056\u2009kg');
+    expect(ladder.querySelector('.real')?.textContent).toContain('7.056\u00a0kg');
     expect(placeOf(ladder.querySelector('.pointer'))).toBeCloseTo(placeOf(last));
     expect(ladder.querySelector('.real')?.classList).not.toContain('outside');
   });

@@ -1,7 +1,8 @@
 import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
+import { UNIT_SPACE } from '@seamwright/shared/util';
 import { KgPipe } from './kg.pipe';
 
-/** A weight in kilograms with its unit in a lighter weight after a thin space. */
+/** A weight in kilograms with its unit in a lighter weight. */
 @Component({
   selector: 'sw-kg',
   imports: [KgPipe],
@@ -13,5 +14,5 @@ export class Kg {
   /** Whole grams; nothing is shown for null. */
   readonly grams = input.required<number | null>();
 
-  protected readonly unit = computed(() => (this.grams() === null ? '' : '\u2009kg'));
+  protected readonly unit = computed(() => (this.grams() === null ? '' : `${UNIT_SPACE}kg`));
 }

@@ -13,7 +13,7 @@ describe('numbers on screen', () => {
   it('writes money, weight, rates and days as the house does', () => {
     TestBed.runInInjectionContext(() => {
       expect(new MoneyPipe().transform(123450, 'GBP')).toBe('£1,234.50');
-      expect(new KgPipe().transform(12480)).toBe('12.480\u2009kg');
+      expect(new KgPipe().transform(12480)).toBe('12.480\u00a0kg');
       expect(new KgPipe().transform(12480, 'bare')).toBe('12.480');
       expect(new PercentPipe().transform(605000)).toContain('60.5');
       expect(new DatePipe().transform('2026-12-04', 'short')).toBe('Fri 4 Dec');
@@ -41,7 +41,7 @@ describe('numbers on screen', () => {
 
     expect(money.nativeElement.textContent).toBe('£14.20/kg');
     expect(money.nativeElement.querySelector('.sw-unit').textContent).toBe('/kg');
-    expect(kg.nativeElement.textContent).toBe('0.280\u2009kg');
-    expect(kg.nativeElement.querySelector('.sw-unit').textContent).toBe('\u2009kg');
+    expect(kg.nativeElement.textContent).toBe('0.280\u00a0kg');
+    expect(kg.nativeElement.querySelector('.sw-unit').textContent).toBe('\u00a0kg');
   });
 });

@@ -1,0 +1,18 @@
+export { AccountsToday, type AccountsWork, type CountedSoFar } from './accounts-today';
+export { BankStatements } from './bank-statements';
+export { CardsApiActions, CardsPageActions, type CardEntry } from './cards/cards.actions';
+export { cardsEffects } from './cards/cards.effects';
+export { cardsFeature } from './cards/cards.feature';
+export { InvoiceListPageActions, InvoicePageActions, type InvoiceSearch } from './invoices/invoices.actions';
+export { invoicesEffects } from './invoices/invoices.effects';
+export { invoicesFeature } from './invoices/invoices.feature';
+export { LedgerPageActions, type EntrySearch } from './ledger/ledger.actions';
+export { ledgerEffects } from './ledger/ledger.effects';
+export { ledgerFeature } from './ledger/ledger.feature';
+export { holdEndsSoon } from './payments/hold-ends';
+export { PaymentsPageActions, type PaymentSearch } from './payments/payments.actions';
+export { paymentsEffects } from './payments/payments.effects';
+export { paymentsFeature } from './payments/payments.feature';
+export { ReconciliationApiActions, ReconciliationPageActions } from './reconciliation/reconciliation.actions';
+export { reconciliationEffects } from './reconciliation/reconciliation.effects';
+export { reconciliationFeature } from './reconciliation/reconciliation.feature';
