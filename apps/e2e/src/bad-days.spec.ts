@@ -1,7 +1,8 @@
 import { expect, test, type Page } from '@playwright/test';
 import { moveClockTo } from './helpers/demo-clock';
 import { ADA, LUCIAN, NORA, RUBEN } from './helpers/people';
-import { goTo, OrderImport } from './helpers/rep-desk';
+import { goTo } from './helpers/navigation';
+import { OrderImport } from './helpers/rep-desk';
 import { as } from './helpers/sign-in';
 import { BasketPage, findSpecification } from './helpers/storefront';
 import { TODAY } from './stack/addresses';

@@ -15,7 +15,7 @@ export const routes: Routes = [
     pathMatch: 'full',
     title: $localize`:@@admin.home.title:Your desk`,
     canActivate: [signedIn],
-    loadComponent: () => import('./home.page').then((m) => m.HomePage),
+    loadComponent: () => import('./home/home.page').then((m) => m.HomePage),
   },
   place(PLACES.orders, () => import('@seamwright/ordering/feature-order-desk').then((m) => m.orderDeskRoutes)),
   place(PLACES.imports, () => import('@seamwright/ordering/feature-order-import').then((m) => m.orderImportRoutes)),
@@ -27,6 +27,12 @@ export const routes: Routes = [
   place(PLACES.specifications, () =>
     import('@seamwright/catalogue/feature-specifications').then((m) => m.specificationsRoutes),
   ),
+  place(PLACES.invoices, () => import('@seamwright/accounts/feature-invoices').then((m) => m.deskInvoicesRoutes)),
+  place(PLACES.payments, () => import('@seamwright/accounts/feature-payments').then((m) => m.paymentsRoutes)),
+  place(PLACES.reconciliation, () =>
+    import('@seamwright/accounts/feature-reconciliation').then((m) => m.reconciliationRoutes),
+  ),
+  place(PLACES.ledger, () => import('@seamwright/accounts/feature-ledger').then((m) => m.ledgerRoutes)),
   place(PLACES.customers, () => import('@seamwright/identity/feature-customers').then((m) => m.customersRoutes)),
   place(PLACES.people, () => import('@seamwright/identity/feature-people').then((m) => m.peopleRoutes)),
   place(PLACES.calendar, () => import('@seamwright/ordering/feature-calendar').then((m) => m.calendarRoutes)),

@@ -72,7 +72,9 @@ export class Books {
 
 async function answerOf<E extends AnyEndpoint>(endpoint: E, query: string, init: RequestInit): Promise<Answer<E>> {
   const url = new URL(`api/v1${endpoint.path}${query}`, addresses().storefront);
-  const answer = await fetch(url, { ...init, method: endpoint.method });
+  // One connection for each call: one kept open may be closed by the server just as the next call goes out.
+  const headers = { ...init.headers, connection: 'close' };
+  const answer = await fetch(url, { ...init, headers, method: endpoint.method });
   const text = await answer.text();
   if (!answer.ok) throw new Error(`${endpoint.id} answered ${answer.status}: ${text}`);
   return endpoint.response?.parse(JSON.parse(text)) as Answer<E>;

@@ -1,5 +1,6 @@
 import { expect, type Locator, type Page } from '@playwright/test';
 import { confirm } from './confirm';
+import { goTo } from './navigation';
 import { tidy } from './reading';
 import type { Upload } from './workbooks';
 
@@ -10,12 +11,6 @@ export interface QuotedPrice {
   readonly chosen: Readonly<Record<string, string>>;
   readonly price: string;
   readonly basis: 'kg' | 'piece' | 'case';
-}
-
-/** Goes to a place of the desk by its link in the navigation. */
-export async function goTo(page: Page, place: string): Promise<void> {
-  await page.getByRole('navigation', { name: 'Main' }).getByRole('link', { name: place, exact: true }).click();
-  await expect(page.getByRole('heading', { level: 1 })).toBeVisible();
 }
 
 /** The rep writes a quote with one price and sends it to the customer; gives its number. */

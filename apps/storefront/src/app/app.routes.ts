@@ -35,6 +35,16 @@ export const routes: Routes = [
     loadChildren: () => import('@seamwright/pricing/feature-received-quotes').then((m) => m.receivedQuotesRoutes),
   },
   {
+    path: 'invoices',
+    canActivate: [signedIn],
+    loadChildren: () => import('@seamwright/accounts/feature-invoices').then((m) => m.buyerInvoicesRoutes),
+  },
+  {
+    path: 'cards',
+    canActivate: [signedIn],
+    loadChildren: () => import('@seamwright/accounts/feature-cards').then((m) => m.cardsRoutes),
+  },
+  {
     path: 'team',
     canActivate: [signedIn, hasRole('buyer_owner')],
     loadChildren: () => import('@seamwright/identity/feature-team').then((m) => m.teamRoutes),

@@ -52,6 +52,7 @@ const TEST_METHODS: readonly { readonly methodId: string; readonly label: string
     :host {
       display: grid;
       gap: 16px;
+      --sw-choice-least: 150px;
     }
   `,
   changeDetection: ChangeDetectionStrategy.OnPush,

@@ -1,5 +1,6 @@
 import { provideHttpClient } from '@angular/common/http';
 import { HttpTestingController, provideHttpClientTesting } from '@angular/common/http/testing';
+import { LOCALE_ID } from '@angular/core';
 import { TestBed } from '@angular/core/testing';
 import { provideRouter, withComponentInputBinding } from '@angular/router';
 import { RouterTestingHarness } from '@angular/router/testing';
@@ -40,6 +41,7 @@ describe('the catalogue page', () => {
   const open = async (address: string) => {
     TestBed.configureTestingModule({
       providers: [
+        { provide: LOCALE_ID, useValue: 'en-GB' },
         provideHttpClient(),
         provideHttpClientTesting(),
         provideStore(),
@@ -114,7 +116,7 @@ describe('the catalogue page', () => {
       textContent?.replace(/\s+/g, ' ').trim(),
     );
     expect(shown).toEqual(['£23.60/kg ≈ £6.61/steak', 'Price on request']);
-    expect(host.querySelector('.count')?.textContent).toContain('Your prices for Fri 4 Dec');
+    expect(host.querySelector('p.count')?.textContent).toContain('Your prices for Fri 4 Dec');
   });
 
   it('says when nothing fits and offers the whole catalogue', async () => {

@@ -2,7 +2,7 @@ import { ChangeDetectionStrategy, Component, computed, inject, LOCALE_ID, signal
 import { MatButton } from '@angular/material/button';
 import { Store } from '@ngrx/store';
 import { selectRoles } from '@seamwright/identity/data-access';
-import type { DeliveryZoneWire } from '@seamwright/ordering/contracts';
+import { listSiteZones, type DeliveryZoneWire } from '@seamwright/ordering/contracts';
 import { DeliveryCalendar, type CalendarAnswer, type ZoneFields } from '@seamwright/ordering/data-access';
 import { HOUSE_CURRENCY } from '@seamwright/pricing/domain';
 import { asProblem, failed, idle, loaded, loading, type Remote } from '@seamwright/shared/data-access';
@@ -33,6 +33,10 @@ export class CalendarPage {
   protected readonly stale = signal(false);
   protected readonly problems = signal<readonly FieldProblem[]>([]);
   protected readonly mayEdit = computed(() => this.roles().includes('admin'));
+  protected readonly maySeeSites = computed(
+    () =>
+      listSiteZones.access.who === 'roles' && listSiteZones.access.roles.some((role) => this.roles().includes(role)),
+  );
   protected readonly currency = HOUSE_CURRENCY;
   private key = newId();
 

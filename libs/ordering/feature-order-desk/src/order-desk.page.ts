@@ -14,7 +14,8 @@ import { MatFormField, MatLabel } from '@angular/material/form-field';
 import { MatInput } from '@angular/material/input';
 import { Router, RouterLink } from '@angular/router';
 import { Store } from '@ngrx/store';
-import { ORDER_FILTERS, type OrderListItem } from '@seamwright/ordering/contracts';
+import { selectRoles } from '@seamwright/identity/data-access/session';
+import { ORDER_FILTERS, placeOrder, type OrderListItem } from '@seamwright/ordering/contracts';
 import { OrderListPageActions, ordersFeature, type OrderSearch } from '@seamwright/ordering/data-access';
 import { OrderStageChip, paymentWords, sourceWord, stageWord } from '@seamwright/ordering/ui';
 import { HOUSE_CURRENCY } from '@seamwright/pricing/domain';
@@ -65,6 +66,11 @@ export class OrderDeskPage {
       customerId: null,
     };
   });
+  private readonly roles = this.store.selectSignal(selectRoles);
+  /** Whether the person may order for a customer; others only look. */
+  protected readonly mayPlace = computed(
+    () => placeOrder.access.who === 'roles' && placeOrder.access.roles.some((role) => this.roles().includes(role)),
+  );
   protected readonly list = this.store.selectSignal(ordersFeature.selectList);
   protected readonly hasMore = this.store.selectSignal(ordersFeature.selectHasMore);
   protected readonly rows = computed(() => this.list().data ?? []);

@@ -11,7 +11,6 @@ import {
   type RequestContext,
 } from '@seamwright/shared/server';
 import { id, instant } from '@seamwright/shared/contracts';
-import { RefusalError } from '@seamwright/shared/util';
 import * as z from 'zod';
 import { cancelOrder as cancel } from './cancel-order';
 import { newestOrders } from './orders.repository';

@@ -4,10 +4,12 @@ import { LOCALE_ID } from '@angular/core';
 import { TestBed, type ComponentFixture } from '@angular/core/testing';
 import { provideRouter } from '@angular/router';
 import { provideEffects } from '@ngrx/effects';
-import { provideState, provideStore } from '@ngrx/store';
+import { provideState, provideStore, Store } from '@ngrx/store';
 import { EMPTY } from 'rxjs';
+import { SessionApiActions, sessionFeature } from '@seamwright/identity/data-access/session';
 import { cuttingDaysEffects, cuttingDaysFeature } from '@seamwright/plant/data-access';
 import { aDay, somePapers } from '@seamwright/plant/data-access/testing';
+import type { Role } from '@seamwright/shared/contracts';
 import { LiveEvents } from '@seamwright/shared/data-access';
 import { Confirm, Toast, type ConfirmQuestion } from '@seamwright/shared/ui';
 import { CuttingDayPage } from './cutting-day.page';
@@ -34,12 +36,19 @@ beforeEach(() => {
       { provide: Toast, useValue: { show: async ({ text }: { text: string }) => (told.push(text), false) } },
       provideStore(),
       provideState(cuttingDaysFeature),
+      provideState(sessionFeature),
       provideEffects(cuttingDaysEffects),
     ],
   });
   http = TestBed.inject(HttpTestingController);
+  signIn('planner');
 });
 afterEach(() => http.verify());
+
+function signIn(role: Role): void {
+  const person = { id: 'p', name: 'Petra', email: 'p@x.example', roles: [role], customerId: null, customerName: null };
+  TestBed.inject(Store).dispatch(SessionApiActions.restored({ person: { ...person, sites: '*' } }));
+}
 
 const host = (): HTMLElement => fixture.nativeElement as HTMLElement;
 const text = (): string => (host().textContent ?? '').replace(/\s+/g, ' ');
@@ -72,9 +81,9 @@ describe('a cutting day', () => {
     expect(knots[1]?.textContent).toContain('16:00');
   });
 
-  it('shows the list by primal with its sums, the work, and the cautions', async () => {
+  it('shows the list by species and primal with its sums, the work, and the cautions', async () => {
     await open();
-    const row = host().querySelector('sw-primal-cuts tbody tr');
+    const row = host().querySelector('sw-cutting-table .cut');
     expect(row?.textContent?.replace(/\s+/g, ' ')).toContain('Striploin steak');
     expect([...(row?.querySelectorAll('td.number') ?? [])].map((cell) => cell.textContent?.trim())).toEqual([
       '29',
@@ -92,7 +101,7 @@ describe('a cutting day', () => {
     await open();
     await press('Pull list');
     const shown = [...host().querySelectorAll('section')].find((section) => !section.classList.contains('off'));
-    expect(shown?.textContent?.replace(/\s+/g, ' ')).toContain('Short: 4.358 kg of Striploin');
+    expect(shown?.textContent?.replace(/\s+/g, ' ')).toContain('Short: 4.358 kg of Beef striploin');
     expect(shown?.textContent?.replace(/\s+/g, ' ')).toContain('B-1 · 1 piece · 6.000 kg · use by Sat 5 Dec');
     expect(shown?.querySelector('sw-why')?.textContent).toContain('why?');
   });
@@ -126,6 +135,13 @@ describe('a cutting day', () => {
     await open();
     await press('Close to orders');
     expect(asked).toHaveLength(1);
+  });
+
+  it('is moved by planners and administrators only', async () => {
+    signIn('floor');
+    await open();
+    expect(text()).toContain('Cutting list as workbook');
+    expect(text()).not.toContain('Close to orders');
   });
 
   it('offers nothing more when it is over', async () => {

@@ -4,8 +4,11 @@ import { MatButton } from '@angular/material/button';
 import { MatTabsModule } from '@angular/material/tabs';
 import { Actions, ofType } from '@ngrx/effects';
 import { Store } from '@ngrx/store';
+import { selectRoles } from '@seamwright/identity/data-access/session';
 import { CuttingDayPageActions, CuttingDaysApiActions, cuttingDaysFeature } from '@seamwright/plant/data-access';
+import { closeCuttingDay } from '@seamwright/plant/contracts';
 import { minutesOf } from '@seamwright/plant/domain';
+import type { Role } from '@seamwright/shared/contracts';
 import {
   Card,
   Confirm,
@@ -21,10 +24,13 @@ import {
 import { formatPlantDate, isPlantDate } from '@seamwright/shared/util';
 import { Cautions } from './cautions';
 import { CustomerCuts } from './customer-cuts';
+import { CuttingTable } from './cutting-table';
 import { dayStages, deedDone, deedName, deedQuestion, nextDeed } from './day-words';
-import { PrimalCuts } from './primal-cuts';
 import { PullTable } from './pull-table';
 import { StationBars } from './station-bars';
+
+/** Who may move a day, as its endpoint says. */
+const MOVERS: readonly Role[] = closeCuttingDay.access.who === 'roles' ? closeCuttingDay.access.roles : [];
 
 type Tab = 'cutting' | 'customers' | 'pull';
 
@@ -34,6 +40,7 @@ type Tab = 'cutting' | 'customers' | 'pull';
     Card,
     Cautions,
     CustomerCuts,
+    CuttingTable,
     Empty,
     ErrorState,
     Icon,
@@ -42,7 +49,6 @@ type Tab = 'cutting' | 'customers' | 'pull';
     MatButton,
     MatTabsModule,
     PageHead,
-    PrimalCuts,
     PullTable,
     SeamLine,
     StationBars,
@@ -81,9 +87,11 @@ export class CuttingDayPage {
     if (!day) return '';
     return $localize`:@@cuttingDay.sub:For delivery on ${this.inWords(day.deliveryDay)}:day: · ${day.orders}:orders: orders, ${day.lines}:lines: lines`;
   });
+  private readonly roles = this.store.selectSignal(selectRoles);
+  /** What comes next, for those whose deed it is. */
   protected readonly next = computed(() => {
     const day = this.day();
-    const deed = day ? nextDeed(day) : null;
+    const deed = day && this.roles().some((role) => MOVERS.includes(role)) ? nextDeed(day) : null;
     return deed && { deed, name: deedName(deed) };
   });
   protected readonly minutes = computed(() => minutesOf(this.papers().data?.cutting.totals.seconds ?? 0));

@@ -3,6 +3,7 @@ import type { CuttingListWire, PullListWire } from '@seamwright/plant/contracts'
 import { Card, Chip, DatePipe, KgPipe, Why, type WhyPart } from '@seamwright/shared/ui';
 import { DataTable, TableCell, type TableColumn } from '@seamwright/shared/ui/table';
 import { formatKgWithUnit, grams } from '@seamwright/shared/util';
+import { primalName } from './day-words';
 
 type Row = PullListWire['rows'][number];
 
@@ -45,6 +46,7 @@ export class PullTable {
     { key: 'outGrams', label: $localize`:@@cuttingDay.outForOrders:Out, kg`, kind: 'kg' },
     { key: 'leftOverGrams', label: $localize`:@@cuttingDay.leftOver:Left, kg`, kind: 'kg' },
   ];
+  protected readonly primalName = primalName;
   protected readonly rowId = ({ primal }: Row): string => primal.id;
   protected readonly shorts = computed(() => this.pull().rows.filter(({ shortGrams }) => shortGrams > 0));
   protected readonly totals = computed(() => {

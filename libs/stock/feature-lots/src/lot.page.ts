@@ -8,7 +8,9 @@ import { LotPageActions, lotsFeature } from '@seamwright/stock/data-access';
 import { lotStates } from '@seamwright/stock/domain';
 import { Card, Chip, Confirm, DatePipe, ErrorState, KgPipe, Loading, PageHead, SeamLine } from '@seamwright/shared/ui';
 import { FieldError } from '@seamwright/shared/ui/forms';
+import { mayDecideLots } from './lot-deciders';
 import { lotStages, lotStateName, lotTone } from './lot-words';
+import { primalNames } from './primal-names';
 
 /** One lot: where it comes from, what is left of it, and whether it may be cut. */
 @Component({
@@ -41,15 +43,18 @@ export class LotPage {
   protected readonly lot = this.store.selectSignal(lotsFeature.selectLot);
   protected readonly move = this.store.selectSignal(lotsFeature.selectMove);
   protected readonly crumbs = [{ label: $localize`:@@lots.heading:Lots`, path: '..' }];
+  protected readonly primalName = primalNames();
+  private readonly mayDecide = mayDecideLots();
   protected readonly stateName = lotStateName;
   protected readonly tone = lotTone;
   protected readonly stages = computed(() => {
     const lot = this.lot().data;
     return lot ? lotStages(lot) : [];
   });
+  /** What the person may do with it as it stands. */
   protected readonly moves = computed(() => {
     const lot = this.lot().data;
-    return lot ? lotStates.allowedMoves(lot.state) : [];
+    return lot && this.mayDecide() ? lotStates.allowedMoves(lot.state) : [];
   });
   /** Whether the reason for a hold is being asked; closes when the lot has moved. */
   protected readonly holding = linkedSignal({ source: () => this.lot().data?.rowVersion, computation: () => false });

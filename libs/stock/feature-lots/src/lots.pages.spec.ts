@@ -4,8 +4,10 @@ import { LOCALE_ID } from '@angular/core';
 import { TestBed, type ComponentFixture } from '@angular/core/testing';
 import { provideRouter, Router } from '@angular/router';
 import { provideEffects } from '@ngrx/effects';
-import { provideState, provideStore } from '@ngrx/store';
+import { provideState, provideStore, Store } from '@ngrx/store';
 import { EMPTY } from 'rxjs';
+import { SessionApiActions, sessionFeature } from '@seamwright/identity/data-access/session';
+import type { Role } from '@seamwright/shared/contracts';
 import { LiveEvents } from '@seamwright/shared/data-access';
 import { Confirm, Toast } from '@seamwright/shared/ui';
 import { lotsEffects, lotsFeature } from '@seamwright/stock/data-access';
@@ -30,12 +32,23 @@ beforeEach(() => {
       { provide: Toast, useValue: { show: async () => false } },
       provideStore(),
       provideState(lotsFeature),
+      provideState(sessionFeature),
       provideEffects(lotsEffects),
     ],
   });
   http = TestBed.inject(HttpTestingController);
+  signIn('technical');
 });
 afterEach(() => http.verify());
+
+function signIn(role: Role): void {
+  const person = { id: 'p', name: 'Tamsin', email: 't@x.example', roles: [role], customerId: null, customerName: null };
+  TestBed.inject(Store).dispatch(SessionApiActions.restored({ person: { ...person, sites: '*' } }));
+}
+const answerPrimals = () =>
+  http
+    .expectOne('/api/v1/lot-primals')
+    .flush({ items: [{ id: aLotWire().nodeId, name: 'Shoulder', species: 'lamb' }] });
 
 const host = (): HTMLElement => fixture.nativeElement as HTMLElement;
 const text = (): string => (host().textContent ?? '').replace(/\s+/g, ' ');
@@ -57,10 +70,11 @@ describe('the lots', () => {
   it('stand with use-by, what is left and the state in words, and can be narrowed to a state', async () => {
     fixture = TestBed.createComponent(LotsPage);
     await fixture.whenStable();
+    answerPrimals();
     http.expectOne('/api/v1/lots').flush({ items: [aLotWire()], nextCursor: null });
     await fixture.whenStable();
     const row = host().querySelector('tbody tr')?.textContent?.replace(/\s+/g, ' ');
-    for (const words of ['L-100', 'Shoulder', 'Wed 9 Dec', 'Released', '50.000', '42.000'])
+    for (const words of ['L-100', 'Lamb shoulder', 'Wed 9 Dec', 'Released', '50.000', '42.000'])
       expect(row).toContain(words);
     const select = host().querySelector('label select') as HTMLSelectElement;
     select.value = 'on-hold';
@@ -69,6 +83,19 @@ describe('the lots', () => {
     await fixture.whenStable();
     expect(text()).toContain('No lots here');
   });
+
+  it('say when a use-by has passed while something is left, and stay readable without the primals', async () => {
+    signIn('floor');
+    fixture = TestBed.createComponent(LotsPage);
+    await fixture.whenStable();
+    http.expectOne('/api/v1/lot-primals').error(new ProgressEvent('error'));
+    const items = [aLotWire({ useBy: '2020-01-02' }), aLotWire({ id: 'b', useBy: '2020-01-02', remainingGrams: 0 })];
+    http.expectOne('/api/v1/lots').flush({ items, nextCursor: null });
+    await fixture.whenStable();
+    expect(host().querySelectorAll('.over')).toHaveLength(1);
+    expect(text()).toContain('Shoulder');
+    expect(text()).not.toContain('Receive a lot');
+  });
 });
 
 describe('one lot', () => {
@@ -76,6 +103,7 @@ describe('one lot', () => {
     fixture = TestBed.createComponent(LotPage);
     fixture.componentRef.setInput('lotId', id);
     await fixture.whenStable();
+    answerPrimals();
     http.expectOne(`/api/v1/lots/${id}`).flush(aLotWire(stated));
     await fixture.whenStable();
   };
@@ -105,6 +133,13 @@ describe('one lot', () => {
     call.flush(aLotWire({ rowVersion: 4 }));
   });
 
+  it('is only looked at by the floor', async () => {
+    signIn('floor');
+    await open();
+    expect(host().querySelectorAll('sw-page-head button')).toHaveLength(0);
+    expect(text()).toContain('Lamb shoulder');
+  });
+
   it('offers no move when there is none', async () => {
     await open({ state: 'recalled' });
     expect(host().querySelectorAll('sw-page-head button')).toHaveLength(0);
@@ -120,9 +155,7 @@ describe('receiving a lot', () => {
   const open = async () => {
     fixture = TestBed.createComponent(ReceiveLotPage);
     await fixture.whenStable();
-    http
-      .expectOne('/api/v1/lot-primals')
-      .flush({ items: [{ id: aLotWire().nodeId, name: 'Shoulder', species: 'lamb' }] });
+    answerPrimals();
     await fixture.whenStable();
   };
   const fillAll = async () => {

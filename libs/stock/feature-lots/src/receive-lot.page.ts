@@ -20,6 +20,7 @@ import { asProblem } from '@seamwright/shared/data-access';
 import { Card, ErrorState, PageHead, Toast } from '@seamwright/shared/ui';
 import { FieldError, FormErrors, showServerErrors } from '@seamwright/shared/ui/forms';
 import { newId, parseKg, unwrap } from '@seamwright/shared/util';
+import { primalWords } from './lot-words';
 
 /** The domain's own reading of a weight, as a validator. */
 function readableKg({ value }: AbstractControl<string>): ValidationErrors | null {
@@ -65,6 +66,7 @@ export class ReceiveLotPage {
     ),
     { initialValue: { items: [], problem: null } },
   );
+  protected readonly primalWords = primalWords;
   protected readonly sending = signal(false);
   protected readonly problem = signal<Problem | null>(null);
   protected readonly homeless = signal<Problem['errors']>([]);

@@ -2,12 +2,7 @@ import { createFeature, createReducer, createSelector, on } from '@ngrx/store';
 import type { InvoiceDetail, InvoiceListItem, LedgerEntry } from '@seamwright/accounts/contracts';
 import type { Problem } from '@seamwright/shared/contracts';
 import { failed, idle, loaded, loading, type Remote } from '@seamwright/shared/data-access';
-import {
-  InvoiceListPageActions,
-  InvoicePageActions,
-  InvoicesApiActions,
-  type InvoiceSearch,
-} from './invoices.actions';
+import { InvoiceListPageActions, InvoicePageActions, InvoicesApiActions, type InvoiceSearch } from './invoices.actions';
 
 export interface InvoicesState {
   readonly search: InvoiceSearch;

@@ -114,7 +114,8 @@ function drawAcross(flow: MoneyFlow, width: number, most: number): SeamPicture {
   labels.push(...right);
   for (const { key, u, v } of drawn.breaks) {
     const minor = minorOfBreak(flow, key);
-    if (key === 'cards-differ') labels.push({ key, minor, x: source - 12, y: belowLabels(left, v + 20), anchor: 'end' });
+    if (key === 'cards-differ')
+      labels.push({ key, minor, x: source - 12, y: belowLabels(left, v + 20), anchor: 'end' });
     else if (key === 'bank-less') labels.push({ key, minor, x: u + 16, y: v + 22, anchor: 'start' });
     else labels.push({ key, minor, x: u - 10, y: v + 22 + (flow.bankLessMinor > 0 ? LABEL : 0), anchor: 'start' });
   }
@@ -233,12 +234,7 @@ function stacked(
 const belowLabels = (labels: readonly FlowLabel[], wanted: number): number =>
   Math.max(wanted, ...labels.map(({ y }) => y + LABEL));
 
-function picture(
-  drawn: Drawn,
-  width: number,
-  labels: readonly FlowLabel[],
-  direction: 'across' | 'down',
-): SeamPicture {
+function picture(drawn: Drawn, width: number, labels: readonly FlowLabel[], direction: 'across' | 'down'): SeamPicture {
   const xy = ({ u, v }: Edge): { x: number; y: number } =>
     direction === 'across' ? { x: round(u), y: round(v) } : { x: round(v), y: round(u) };
   const posts = drawn.posts.map(({ key, size, ...edge }) => ({

@@ -1,0 +1,1 @@
+export { cardsRoutes } from './cards.routes';

@@ -1,0 +1,1 @@
+export { buyerInvoicesRoutes, deskInvoicesRoutes } from './invoices.routes';

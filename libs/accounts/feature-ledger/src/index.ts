@@ -1,0 +1,1 @@
+export { ledgerRoutes } from './ledger.routes';

@@ -1,0 +1,1 @@
+export { paymentsRoutes } from './payments.routes';

@@ -1,0 +1,1 @@
+export { reconciliationRoutes } from './reconciliation.routes';
