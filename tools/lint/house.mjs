@@ -34,6 +34,7 @@ const FURTHER_ENTRIES = {
   'identity/data-access': ['session'],
   'identity/contracts': ['session'],
   'ordering/data-access': ['frame'],
+  'accounts/ui': ['money-seam'],
 };
 
 export const furtherEntries = (storey, room) => FURTHER_ENTRIES[`${storey}/${room}`] ?? [];

@@ -2,7 +2,13 @@ import { TestBed } from '@angular/core/testing';
 import { provideEffects } from '@ngrx/effects';
 import { provideState, provideStore, Store } from '@ngrx/store';
 import { of, Subject, throwError, type Observable } from 'rxjs';
-import { getReconciliation, ledgerBalances, ledgerEntries, listInvoices, listPayments } from '@seamwright/accounts/contracts';
+import {
+  getReconciliation,
+  ledgerBalances,
+  ledgerEntries,
+  listInvoices,
+  listPayments,
+} from '@seamwright/accounts/contracts';
 import { ApiClient, ApiProblem, LiveEvents, type LiveChange } from '@seamwright/shared/data-access';
 import { AccountsToday, type AccountsWork } from './accounts-today';
 import { LedgerPageActions } from './ledger/ledger.actions';
@@ -12,7 +18,15 @@ import { PaymentsPageActions } from './payments/payments.actions';
 import { paymentsEffects } from './payments/payments.effects';
 import { paymentsFeature } from './payments/payments.feature';
 
-const offline = new ApiProblem({ type: '', title: '', status: 0, detail: '', instance: '', code: 'offline', errors: [] });
+const offline = new ApiProblem({
+  type: '',
+  title: '',
+  status: 0,
+  detail: '',
+  instance: '',
+  code: 'offline',
+  errors: [],
+});
 const live = new Subject<LiveChange>();
 let calls: { id: string; query: unknown }[];
 let answers: Record<string, () => Observable<unknown>>;

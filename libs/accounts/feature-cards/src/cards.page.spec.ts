@@ -75,7 +75,14 @@ describe('the page of cards', () => {
       await fixture.whenStable();
     };
     await sendAndGet(503, null);
-    const refused = { type: '', title: 'Refused', status: 422, detail: 'This card was refused.', instance: '', code: 'x' };
+    const refused = {
+      type: '',
+      title: 'Refused',
+      status: 422,
+      detail: 'This card was refused.',
+      instance: '',
+      code: 'x',
+    };
     await sendAndGet(422, refused);
     expect(words()).toContain('This card was refused.');
     await sendAndGet(422, refused);
@@ -97,7 +104,11 @@ describe('the page of cards', () => {
 
   it('leaves a real card to the form of the processor', async () => {
     const handlers = new Map<string, () => void>();
-    const form = { on: (event: string, heard: () => void) => handlers.set(event, heard), mount: jest.fn(), destroy: jest.fn() };
+    const form = {
+      on: (event: string, heard: () => void) => handlers.set(event, heard),
+      mount: jest.fn(),
+      destroy: jest.fn(),
+    };
     const elements = { create: () => form, getElement: () => form, submit: jest.fn().mockResolvedValue({}) };
     const createPaymentMethod = jest.fn().mockResolvedValue({ paymentMethod: { id: 'pm_real' } });
     loader.mockResolvedValueOnce({ elements: () => elements, createPaymentMethod });

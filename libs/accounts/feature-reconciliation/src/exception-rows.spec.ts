@@ -29,10 +29,6 @@ describe('what is not explained, in words', () => {
       '2026-12-01' as PlantDate,
       'en-GB',
     );
-    expect(strange.map(({ what }) => what)).toEqual([
-      'Charge ch_9',
-      'A bank line that names a payout',
-      'Payout po_9',
-    ]);
+    expect(strange.map(({ what }) => what)).toEqual(['Charge ch_9', 'A bank line that names a payout', 'Payout po_9']);
   });
 });

@@ -50,7 +50,7 @@ describe('the page of a week', () => {
   }
 
   it('lists what is not explained, with its cause and the act that fits', async () => {
-    const { page, words, press } = await opened();
+    const { fixture, page, words, press } = await opened();
     expect(words()).toContain('2 things are not explained yet');
     const [charge, bank] = [...page.querySelectorAll('sw-week-exceptions tr.mat-mdc-row')];
     expect(charge && words(charge)).toMatch(/Missing there.*order 1032.*£212\.40.*not told of it yet/);
@@ -58,7 +58,7 @@ describe('the page of a week', () => {
     if (charge) await press('Ask the processor', charge);
     http.expectOne({ method: 'POST', url: '/api/v1/reconciliation/refresh' }).flush({ transactions: 1, payouts: 0 });
     http.expectOne('/api/v1/reconciliation').flush({ ...aWeek, exceptions: [] });
-    await TestBed.inject(Router).navigate([]);
+    await fixture.whenStable();
     expect(words()).toContain('Every penny is explained');
   });
 
@@ -109,7 +109,14 @@ describe('the page of a week', () => {
   it('names faults of a statement by line and column', async () => {
     const { fixture, page, words, giveStatement } = await opened();
     const errors = [{ pointer: '/lines/4/Amount', message: '“ten” is not an amount of money.' }];
-    const problem = { type: '', title: 'No', status: 422, detail: '1 cells', instance: '', code: 'statement-has-faults' };
+    const problem = {
+      type: '',
+      title: 'No',
+      status: 422,
+      detail: '1 cells',
+      instance: '',
+      code: 'statement-has-faults',
+    };
     (await giveStatement()).flush({ ...problem, errors }, { status: 422, statusText: 'No' });
     await fixture.whenStable();
     const row = page.querySelector('sw-statement-import tr.mat-mdc-row');

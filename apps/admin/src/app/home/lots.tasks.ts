@@ -26,25 +26,27 @@ const lotTask = (lot: LotWire, primals: Primals, locale: string): Omit<Task, 'no
 
 /** Released lots with something left whose use-by is within two days, the first to expire first; over ones come last. */
 export const expiringTasks = (lots: readonly LotWire[], primals: Primals, today: PlantDate, locale: string): Task[] =>
-  [...lots].sort((a, b) => Number(isOver(a, today)) - Number(isOver(b, today))).flatMap((lot) => {
-    if (lot.useBy === null || lot.remainingGrams === 0) return [];
-    const ahead = daysAhead(lot.useBy, today);
-    if (ahead > SOON_DAYS) return [];
-    const mark: Task['mark'] =
-      ahead < 0
-        ? { tone: 'bad', word: $localize`:@@admin.home.lotOver:Use-by passed` }
-        : ahead === 0
-          ? { tone: 'eye', word: $localize`:@@admin.home.lotToday:Use today` }
-          : {
-              tone: 'eye',
-              word:
-                ahead === 1
-                  ? $localize`:@@admin.home.lotTomorrow:Use by tomorrow`
-                  : $localize`:@@admin.home.lotSoon:Use by ${inWords(lot.useBy, locale)}:day:`,
-            };
-    const note = $localize`:@@admin.home.lotUseBy:${lot.code}:lot: · use by ${inWords(lot.useBy, locale)}:day:`;
-    return [{ ...lotTask(lot, primals, locale), note, mark }];
-  });
+  [...lots]
+    .sort((a, b) => Number(isOver(a, today)) - Number(isOver(b, today)))
+    .flatMap((lot) => {
+      if (lot.useBy === null || lot.remainingGrams === 0) return [];
+      const ahead = daysAhead(lot.useBy, today);
+      if (ahead > SOON_DAYS) return [];
+      const mark: Task['mark'] =
+        ahead < 0
+          ? { tone: 'bad', word: $localize`:@@admin.home.lotOver:Use-by passed` }
+          : ahead === 0
+            ? { tone: 'eye', word: $localize`:@@admin.home.lotToday:Use today` }
+            : {
+                tone: 'eye',
+                word:
+                  ahead === 1
+                    ? $localize`:@@admin.home.lotTomorrow:Use by tomorrow`
+                    : $localize`:@@admin.home.lotSoon:Use by ${inWords(lot.useBy, locale)}:day:`,
+              };
+      const note = $localize`:@@admin.home.lotUseBy:${lot.code}:lot: · use by ${inWords(lot.useBy, locale)}:day:`;
+      return [{ ...lotTask(lot, primals, locale), note, mark }];
+    });
 
 /** Lots that wait for a decision: those just received and those on hold, with the reason. */
 export const undecidedTasks = (lots: readonly LotWire[], primals: Primals, locale: string): Task[] =>

@@ -19,7 +19,15 @@ import { invoicesFeature } from './invoices.feature';
 const item = (id: string) => ({ id }) as InvoiceListItem;
 const detail = (id: string, paidMinor = 0) => ({ id, paidMinor }) as InvoiceDetail;
 const all = { standing: null, customerId: null };
-const offline = new ApiProblem({ type: '', title: '', status: 0, detail: '', instance: '', code: 'offline', errors: [] });
+const offline = new ApiProblem({
+  type: '',
+  title: '',
+  status: 0,
+  detail: '',
+  instance: '',
+  code: 'offline',
+  errors: [],
+});
 
 const live = new Subject<LiveChange>();
 let calls: { id: string; input: Record<string, unknown> }[];

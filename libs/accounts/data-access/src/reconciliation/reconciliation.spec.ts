@@ -64,7 +64,10 @@ describe('a week of card money', () => {
     answers[getReconciliation.id] = () => new Subject();
     store.dispatch(ReconciliationPageActions.processorAsked());
     expect(asked).toHaveLength(2);
-    expect(state()).toMatchObject({ week: { status: 'loaded', data: { from: '2026-11-23' } }, asking: { running: false } });
+    expect(state()).toMatchObject({
+      week: { status: 'loaded', data: { from: '2026-11-23' } },
+      asking: { running: false },
+    });
     store.dispatch(ReconciliationPageActions.statementTaken());
     expect(asked).toEqual([{ day: '2026-11-25' }, { day: '2026-11-25' }, { day: '2026-11-25' }]);
   });
