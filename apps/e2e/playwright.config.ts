@@ -25,7 +25,7 @@ export default defineConfig({
   retries: 0,
   fullyParallel: false,
   timeout: 4 * PATIENCE_MS,
-  globalTimeout: 12 * PATIENCE_MS,
+  globalTimeout: 40 * PATIENCE_MS,
   expect: { timeout: PATIENCE_MS },
   use: {
     headless: true,

@@ -39,9 +39,10 @@ export class LiveHub {
     const client = new Client({ connectionString: this.url });
     client.on('notification', ({ payload }) => this.#spread(payload ?? '[]'));
     client.on('error', (error) => this.log.warn({ err: error }, 'the live connection broke'));
-    client.on('end', () => this.#again());
     await client.connect();
     await client.query('listen live');
+    // Only a connection that stood is missed: one that never came about is tried again by whoever wanted it.
+    client.once('end', () => this.#again());
     this.#client = client;
     // Whatever was missed meanwhile: browsers fetch anew.
     this.#listeners.forEach(({ response }) => response.write('event: again\ndata: {}\n\n'));
