@@ -116,9 +116,9 @@ export class PaymentsPage {
       this.search();
       untracked(() => this.load());
     });
-    // The payment that the address names may stand further back.
+    // The payment that the address names may stand further back; what failed is tried again by the person only.
     effect(() => {
-      if (!this.payment() || this.looked() || this.loading() || !this.hasMore()) return;
+      if (!this.payment() || this.looked() || this.list().status !== 'loaded' || !this.hasMore()) return;
       untracked(() => this.more());
     });
   }

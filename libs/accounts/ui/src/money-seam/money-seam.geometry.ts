@@ -112,12 +112,14 @@ function drawAcross(flow: MoneyFlow, width: number, most: number): SeamPicture {
     'start',
   );
   labels.push(...right);
+  // Below the ribbon of what is on its way, which bends across there.
+  const clear = 22 + (flow.onItsWayMinor > 0 ? places.gap : 0);
   for (const { key, u, v } of drawn.breaks) {
     const minor = minorOfBreak(flow, key);
     if (key === 'cards-differ')
       labels.push({ key, minor, x: source - 12, y: belowLabels(left, v + 20), anchor: 'end' });
-    else if (key === 'bank-less') labels.push({ key, minor, x: u + 16, y: v + 22, anchor: 'start' });
-    else labels.push({ key, minor, x: u - 10, y: v + 22 + (flow.bankLessMinor > 0 ? LABEL : 0), anchor: 'start' });
+    else if (key === 'bank-less') labels.push({ key, minor, x: u + 16, y: v + clear, anchor: 'start' });
+    else labels.push({ key, minor, x: u - 10, y: v + clear + (flow.bankLessMinor > 0 ? LABEL : 0), anchor: 'start' });
   }
   return picture(drawn, width, labels, 'across');
 }

@@ -37,7 +37,7 @@ describe('the drawing of the money seam', () => {
   it('names every amount it draws, and marks the break with words as well', async () => {
     const page = await drawn(week);
     const labels = [...page.querySelectorAll('text')].map((text) =>
-      (text.textContent ?? '').replace(/\s+/g, ' ').trim(),
+      [...text.children].map(({ textContent }) => textContent).join(' '),
     );
     expect(labels).toEqual(expect.arrayContaining(['paid out £16,693.17', 'unexplained, less £42.00']));
     expect(page.querySelectorAll('.break')).toHaveLength(1);
