@@ -1,6 +1,6 @@
 // Weighs the first load of a built application as it goes through the network, and looks for what has no place in it.
 //   node tools/build/budgets.mjs [storefront|admin …]
-import { readFileSync } from 'node:fs';
+import { existsSync, readFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { gzipSync } from 'node:zlib';
 import { Told, checkout, isMain, runMain } from '../start/system.mjs';
@@ -18,7 +18,9 @@ export const limits = { storefront: 140_000, admin: 170_000 };
  * @throws {Told} with what is too heavy or has no place in the first load
  */
 export function checkBudget(root, application) {
-  const metafile = JSON.parse(readFileSync(join(root, 'dist', application, 'stats.json'), 'utf8'));
+  const stats = join(root, 'dist', application, 'stats.json');
+  if (!existsSync(stats)) throw new Told(`${application} is not built: node tools/build/build.mjs ${application}`);
+  const metafile = JSON.parse(readFileSync(stats, 'utf8'));
   const transferOf = (output) => gzipSync(readFileSync(join(root, browserFolder(application), output))).length;
   const findings = budgets.examine(metafile, transferOf);
   const wrong = budgets.complaint(application, findings, limits[application]);
