@@ -2,8 +2,11 @@ import { provideHttpClient } from '@angular/common/http';
 import { HttpTestingController, provideHttpClientTesting } from '@angular/common/http/testing';
 import { TestBed } from '@angular/core/testing';
 import { provideRouter } from '@angular/router';
+import { provideState, provideStore, Store } from '@ngrx/store';
 import { aPublicSpecification } from '@seamwright/catalogue/data-access/testing';
 import type { StaffSpecification } from '@seamwright/catalogue/contracts';
+import { SessionApiActions, sessionFeature } from '@seamwright/identity/data-access/session';
+import type { Role } from '@seamwright/shared/contracts';
 import { Confirm, Toast } from '@seamwright/shared/ui';
 import { SpecificationRecordPage } from './specification-record.page';
 
@@ -26,17 +29,21 @@ const record: StaffSpecification = {
 };
 
 describe('the record of a specification', () => {
-  const open = async (sure: boolean) => {
+  const open = async (sure: boolean, role: Role = 'technical') => {
     const ask = jest.fn().mockResolvedValue(sure);
     TestBed.configureTestingModule({
       providers: [
         provideHttpClient(),
         provideHttpClientTesting(),
         provideRouter([]),
+        provideStore(),
+        provideState(sessionFeature),
         { provide: Confirm, useValue: { ask } },
         { provide: Toast, useValue: { show: jest.fn() } },
       ],
     });
+    const person = { id: 'p', name: 'Tamsin', email: 't@x.example', customerId: null, customerName: null };
+    TestBed.inject(Store).dispatch(SessionApiActions.restored({ person: { ...person, roles: [role], sites: '*' } }));
     const fixture = TestBed.createComponent(SpecificationRecordPage);
     fixture.componentRef.setInput('code', 'BF-901');
     await fixture.whenStable();
@@ -53,6 +60,12 @@ describe('the record of a specification', () => {
     };
     return { fixture, http, host, ask, withdraw };
   };
+
+  it('can be withdrawn by the technical only', async () => {
+    const { host } = await open(true, 'rep');
+    expect(host.querySelector('sw-record-numbers')).not.toBeNull();
+    expect(host.querySelector('sw-withdraw-form')).toBeNull();
+  });
 
   it('closes the outputs of the primal with the loss', async () => {
     const { host } = await open(true);

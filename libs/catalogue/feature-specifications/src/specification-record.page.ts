@@ -1,10 +1,12 @@
 import { ChangeDetectionStrategy, Component, computed, DestroyRef, effect, inject, input, signal } from '@angular/core';
 import { takeUntilDestroyed } from '@angular/core/rxjs-interop';
 import { Router } from '@angular/router';
-import type { StaffSpecification } from '@seamwright/catalogue/contracts';
+import { Store } from '@ngrx/store';
+import { withdrawSpecification, type StaffSpecification } from '@seamwright/catalogue/contracts';
 import { offeredNumbers, TechnicalApi } from '@seamwright/catalogue/data-access';
 import { drawnNumbers, impliedDifferencePercent, impliedGrams, resolveOffer } from '@seamwright/catalogue/domain';
 import { SpecDrawing, weightText } from '@seamwright/catalogue/ui';
+import { selectRoles } from '@seamwright/identity/data-access/session';
 import { asProblem, failed, idle, loaded, loading, type Remote } from '@seamwright/shared/data-access';
 import { Card, Confirm, ErrorState, Loading, PageHead, Toast } from '@seamwright/shared/ui';
 import { RecordNumbers } from './record-numbers';
@@ -41,9 +43,14 @@ export class SpecificationRecordPage {
   readonly #toast = inject(Toast);
   readonly #router = inject(Router);
   readonly #destroyed = inject(DestroyRef);
+  readonly #roles = inject(Store).selectSignal(selectRoles);
 
   protected readonly record = signal<Remote<StaffSpecification>>(idle());
   protected readonly sending = signal(false);
+  protected readonly mayWithdraw = computed(() => {
+    const { access } = withdrawSpecification;
+    return access.who === 'roles' && access.roles.some((role) => this.#roles().includes(role));
+  });
   protected readonly crumbs = [
     { label: $localize`:@@catalogue.technical.title:Specifications`, path: '/specifications' },
   ];

@@ -7,7 +7,7 @@ import type { SpecificationRow } from '@seamwright/catalogue/contracts';
 import { TechnicalApi } from '@seamwright/catalogue/data-access';
 import { speciesName } from '@seamwright/catalogue/ui';
 import { asProblem, failed, idle, loaded, loading, type Remote } from '@seamwright/shared/data-access';
-import { ErrorState, PageHead } from '@seamwright/shared/ui';
+import { Card, ErrorState, PageHead } from '@seamwright/shared/ui';
 import { DataTable, TableCell, type TableColumn } from '@seamwright/shared/ui/table';
 import { catchError, debounceTime, map, of, startWith, Subject, switchMap } from 'rxjs';
 import { StageChip } from './stage-chip';
@@ -21,7 +21,7 @@ const REST_MS = 250;
 
 /** Every specification with its newest version and where that stands. */
 @Component({
-  imports: [DataTable, ErrorState, MatButton, MatFormFieldModule, MatInputModule, PageHead, StageChip, TableCell],
+  imports: [Card, DataTable, ErrorState, MatButton, MatFormFieldModule, MatInputModule, PageHead, StageChip, TableCell],
   templateUrl: './specifications.page.html',
   styleUrl: './specifications.page.scss',
   changeDetection: ChangeDetectionStrategy.OnPush,
@@ -33,7 +33,7 @@ export class SpecificationsPage {
   protected readonly words = new Subject<string>();
   protected readonly rows = signal<Remote<Rows>>(idle());
   protected readonly columns: readonly TableColumn<SpecificationRow>[] = [
-    { key: 'code', label: $localize`:@@catalogue.technical.code:Code`, kind: 'text' },
+    { key: 'code', label: $localize`:@@catalogue.technical.code:Code`, kind: 'code' },
     { key: 'name', label: $localize`:@@catalogue.technical.name:Name`, kind: 'text' },
     {
       key: 'species',

@@ -19,7 +19,7 @@ import { ORDER_FILTERS, placeOrder, type OrderListItem } from '@seamwright/order
 import { OrderListPageActions, ordersFeature, type OrderSearch } from '@seamwright/ordering/data-access';
 import { OrderStageChip, paymentWords, sourceWord, stageWord } from '@seamwright/ordering/ui';
 import { HOUSE_CURRENCY } from '@seamwright/pricing/domain';
-import { Chip, Empty, ErrorState, PageHead } from '@seamwright/shared/ui';
+import { Card, Chip, Empty, ErrorState, PageHead } from '@seamwright/shared/ui';
 import { DataTable, TableCell, type TableColumn } from '@seamwright/shared/ui/table';
 import { isPlantDate } from '@seamwright/shared/util';
 
@@ -30,6 +30,7 @@ const isFilter = (text: string | undefined): text is (typeof ORDER_FILTERS)[numb
 @Component({
   selector: 'sw-order-desk-page',
   imports: [
+    Card,
     Chip,
     DataTable,
     Empty,
@@ -93,7 +94,6 @@ export class OrderDeskPage {
       value: ({ customer }) => customer.name,
       sortable: true,
     },
-    { key: 'site', label: $localize`:@@desk.column.site:Site`, kind: 'text', value: ({ site }) => site.name },
     { key: 'deliveryDay', label: $localize`:@@desk.column.day:Delivery`, kind: 'date', sortable: true },
     { key: 'stage', label: $localize`:@@desk.column.stage:Stage`, kind: 'template' },
     {

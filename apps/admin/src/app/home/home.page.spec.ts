@@ -39,7 +39,7 @@ describe('the first page', () => {
     http.verify();
   });
 
-  it('keeps its other boards when one question fails, and asks that one again', async () => {
+  it('says when a question failed, and asks it again', async () => {
     const { fixture, page, http } = await open('floor');
     const days = '/api/v1/cutting-days?state=released';
     http.expectOne(days).flush({}, { status: 500, statusText: 'x' });
