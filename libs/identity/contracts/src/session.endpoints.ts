@@ -1,5 +1,6 @@
 import * as z from 'zod';
-import { anyone, defineEndpoint, email, id, ROLES } from '@seamwright/shared/contracts';
+import { defineEndpoint, email, id, ROLES } from '@seamwright/shared/contracts';
+import { refreshAddress, signInAddress, signOutAddress } from './session.addresses';
 
 export const application = z.enum(['storefront', 'admin']);
 /** Everything, or these by id. */
@@ -31,9 +32,7 @@ export type SignedIn = z.infer<typeof signedIn>;
 export const signIn = defineEndpoint({
   id: 'session.sign-in',
   summary: 'Sign in with e-mail and password',
-  method: 'POST',
-  path: '/session',
-  access: anyone,
+  ...signInAddress,
   body: z.strictObject({ application, email, password }),
   response: signedIn,
 });
@@ -45,9 +44,7 @@ export type Refreshed = z.infer<typeof refreshed>;
 export const refreshSession = defineEndpoint({
   id: 'session.refresh',
   summary: 'Get a new access token by the cookie of the application',
-  method: 'POST',
-  path: '/session/refresh',
-  access: anyone,
+  ...refreshAddress,
   body: z.strictObject({ application }),
   response: refreshed,
 });
@@ -55,8 +52,6 @@ export const refreshSession = defineEndpoint({
 export const signOut = defineEndpoint({
   id: 'session.sign-out',
   summary: 'Sign out here',
-  method: 'DELETE',
-  path: '/session',
-  access: anyone,
+  ...signOutAddress,
   query: { application },
 });

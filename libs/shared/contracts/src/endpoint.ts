@@ -43,6 +43,13 @@ export interface Endpoint<
   readonly file: string | null;
 }
 
+/**
+ * What sending a call needs of its endpoint: where it goes, and how. No shape is among it, so that the calls of a first
+ * load can be declared apart from their shapes, without zod.
+ */
+export type CallAddress = Pick<Endpoint, 'method' | 'path' | 'access'> &
+  Partial<Pick<Endpoint, 'idempotent' | 'upload'>>;
+
 interface Declaration<
   P extends Shape,
   Q extends Shape,

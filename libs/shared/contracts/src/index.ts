@@ -6,6 +6,7 @@ export {
   type Access,
   type Answer,
   type AnyEndpoint,
+  type CallAddress,
   type CallInput,
   type CheckedInput,
   type Endpoint,

@@ -24,7 +24,7 @@ import {
   throwError,
   type Observable,
 } from 'rxjs';
-import type { Answer, AnyEndpoint, CallInput } from '@seamwright/shared/contracts';
+import type { Answer, AnyEndpoint, CallAddress, CallInput } from '@seamwright/shared/contracts';
 import { newId } from '@seamwright/shared/util';
 import { ACCESS_TOKEN_SOURCE } from './access-token';
 import { ApiProblem, asProblem } from './api-problem';
@@ -55,8 +55,11 @@ export class ApiClient {
   readonly #http = inject(HttpClient);
   readonly #tokens = inject(ACCESS_TOKEN_SOURCE, { optional: true });
 
-  /** Calls an endpoint that answers JSON or nothing. */
-  call<E extends AnyEndpoint>(endpoint: E, input: CallInput<E>): Observable<Answer<E>> {
+  /**
+   * Calls an endpoint that answers JSON or nothing. What an application's start calls is given by its address, with the
+   * endpoint as the type: `call<typeof signIn>(signInAddress, …)`.
+   */
+  call<E extends AnyEndpoint>(endpoint: E | CallAddress, input: CallInput<E>): Observable<Answer<E>> {
     return this.#send(endpoint, input as Sent, 'json').pipe(map((response) => response.body as Answer<E>));
   }
 
@@ -86,7 +89,7 @@ export class ApiClient {
   }
 
   #send(
-    endpoint: AnyEndpoint,
+    endpoint: CallAddress,
     input: Sent,
     kind: 'json' | 'blob',
     progress?: Subject<number>,
@@ -107,7 +110,7 @@ export class ApiClient {
   }
 
   #request(
-    endpoint: AnyEndpoint,
+    endpoint: CallAddress,
     input: Sent,
     kind: 'json' | 'blob',
     key: string | null,
@@ -141,7 +144,7 @@ export class ApiClient {
 
 const refuse = (error: unknown) => throwError(() => new ApiProblem(asProblem(error)));
 
-function addressOf(endpoint: AnyEndpoint, params: Record<string, unknown> = {}): string {
+function addressOf(endpoint: CallAddress, params: Record<string, unknown> = {}): string {
   return `/api/v1${endpoint.path.replace(/:(\w+)/g, (_, name: string) => encodeURIComponent(String(params[name])))}`;
 }
 
@@ -154,7 +157,7 @@ function queryOf(query: Record<string, unknown> = {}): HttpParams {
   return params;
 }
 
-function bodyOf(endpoint: AnyEndpoint, input: Sent): unknown {
+function bodyOf(endpoint: CallAddress, input: Sent): unknown {
   if (!endpoint.upload) return input.body;
   const form = new FormData();
   for (const [name, value] of Object.entries((input.body ?? {}) as Record<string, unknown>))

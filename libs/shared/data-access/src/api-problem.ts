@@ -1,5 +1,6 @@
 import { HttpErrorResponse } from '@angular/common/http';
-import { problem, type Problem } from '@seamwright/shared/contracts';
+import type { Problem } from '@seamwright/shared/contracts';
+import { readProblem } from './problem-document';
 
 /** A refused or failed call, as the screens show it. */
 export class ApiProblem extends Error {
@@ -31,8 +32,8 @@ export function asProblem(error: unknown): Problem {
         $localize`The desk could not be reached. What you typed is kept; try again when the connection is back.`,
       );
     }
-    const read = problem.safeParse(typeof error.error === 'string' ? parsed(error.error) : error.error);
-    if (read.success) return read.data;
+    const read = readProblem(typeof error.error === 'string' ? parsed(error.error) : error.error);
+    if (read) return read;
     return words(
       error.status,
       'unexpected',

@@ -14,7 +14,12 @@ import {
   type Observable,
 } from 'rxjs';
 import { ApiClient, ApiProblem, type AccessTokenSource } from '@seamwright/shared/data-access';
-import { refreshSession, type SessionPerson, type SignedIn } from '@seamwright/identity/contracts/session';
+import {
+  refreshAddress,
+  type refreshSession,
+  type SessionPerson,
+  type SignedIn,
+} from '@seamwright/identity/contracts/session';
 import { IDENTITY_APPLICATION } from './identity-application';
 
 /** What became of the sign-in without this tab's doing. */
@@ -97,7 +102,7 @@ export class SessionTokens implements AccessTokenSource, OnDestroy {
     const body = { application: this.#application };
     return this.#injector
       .get(ApiClient)
-      .call(refreshSession, { body })
+      .call<typeof refreshSession>(refreshAddress, { body })
       .pipe(
         map(({ session }) => session),
         catchError((error: unknown) =>

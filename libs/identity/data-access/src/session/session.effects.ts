@@ -4,7 +4,12 @@ import { Actions, createEffect, ofType } from '@ngrx/effects';
 import { Store } from '@ngrx/store';
 import { catchError, exhaustMap, filter, map, of, tap, withLatestFrom } from 'rxjs';
 import { ApiClient, asProblem } from '@seamwright/shared/data-access';
-import { signIn as signInEndpoint, signOut as signOutEndpoint } from '@seamwright/identity/contracts/session';
+import {
+  signInAddress,
+  signOutAddress,
+  type signIn as SignIn,
+  type signOut as SignOut,
+} from '@seamwright/identity/contracts/session';
 import { IDENTITY_APPLICATION } from './identity-application';
 import { PageLoad } from './page-load';
 import { returnAddress } from './return-address';
@@ -36,7 +41,7 @@ export const signIn = createEffect(
     actions.pipe(
       ofType(SessionActions.signInSubmitted),
       exhaustMap(({ email, password }) =>
-        api.call(signInEndpoint, { body: { application, email, password } }).pipe(
+        api.call<typeof SignIn>(signInAddress, { body: { application, email, password } }).pipe(
           tap((session) => tokens.keep(session)),
           map(({ person }) => SessionApiActions.signedIn({ person })),
           catchError((error: unknown) => of(SessionApiActions.signInRefused({ problem: asProblem(error) }))),
@@ -71,7 +76,7 @@ export const signOut = createEffect(
     actions.pipe(
       ofType(SessionActions.signOutAsked),
       exhaustMap(() =>
-        api.call(signOutEndpoint, { query: { application } }).pipe(
+        api.call<typeof SignOut>(signOutAddress, { query: { application } }).pipe(
           tap(() => tokens.drop()),
           map(() => SessionApiActions.signedOut()),
           catchError((error: unknown) => of(SessionApiActions.signOutFailed({ problem: asProblem(error) }))),
