@@ -33,6 +33,7 @@ const FURTHER_ENTRIES = {
   'shared/ui': ['frame', 'table', 'forms'],
   'identity/data-access': ['session'],
   'identity/contracts': ['session'],
+  'catalogue/domain': ['choice-key'],
   'ordering/data-access': ['frame'],
   'accounts/ui': ['money-seam'],
 };

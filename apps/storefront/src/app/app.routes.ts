@@ -1,5 +1,6 @@
 import type { Routes } from '@angular/router';
 import { hasRole, signedIn } from '@seamwright/identity/data-access/session';
+import { basketRestored } from '@seamwright/ordering/data-access/frame';
 
 /** Every feature is a chunk of its own. */
 export const routes: Routes = [
@@ -21,7 +22,7 @@ export const routes: Routes = [
   },
   {
     path: 'basket',
-    canActivate: [signedIn],
+    canActivate: [signedIn, basketRestored],
     loadChildren: () => import('@seamwright/ordering/feature-basket').then((m) => m.basketRoutes),
   },
   {

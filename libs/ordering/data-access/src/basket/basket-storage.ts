@@ -1,7 +1,7 @@
 import { Injectable } from '@angular/core';
 import { newId } from '@seamwright/shared/util';
-import { filter, fromEvent, map, type Observable } from 'rxjs';
-import { basketDraft, emptyDraft, type BasketDraft } from './basket-draft';
+import { filter, fromEvent, map, startWith, switchMap, type Observable } from 'rxjs';
+import { emptyDraft, type BasketDraft } from './basket-draft';
 
 const keyOf = (owner: string): string => `seamwright-basket:${owner}`;
 
@@ -9,14 +9,9 @@ const keyOf = (owner: string): string => `seamwright-basket:${owner}`;
 @Injectable({ providedIn: 'root' })
 export class BasketStorage {
   /** The kept basket; an empty one when there is none, or when what stands there is not a basket. */
-  read(owner: string): BasketDraft {
-    try {
-      const kept = basketDraft.safeParse(JSON.parse(localStorage.getItem(keyOf(owner)) ?? 'null'));
-      if (kept.success) return kept.data;
-    } catch {
-      // What can't be read is no basket.
-    }
-    return emptyDraft(newId());
+  async read(owner: string): Promise<BasketDraft> {
+    const kept = textOf(owner);
+    return (kept === null ? null : await checked(kept)) ?? emptyDraft(newId());
   }
 
   write(owner: string, draft: BasketDraft): void {
@@ -28,11 +23,35 @@ export class BasketStorage {
     }
   }
 
-  /** Tells when another tab of the browser changed the person's basket. */
-  changesElsewhere(owner: string): Observable<BasketDraft> {
+  /** The kept basket, and the newer ones that other tabs of the browser make of it. */
+  baskets(owner: string): Observable<BasketDraft> {
     return fromEvent<StorageEvent>(window, 'storage').pipe(
       filter(({ key }) => key === keyOf(owner)),
-      map(() => this.read(owner)),
+      map(() => owner),
+      startWith(owner),
+      switchMap((whose) => this.read(whose)),
     );
+  }
+}
+
+function textOf(owner: string): string | null {
+  try {
+    return localStorage.getItem(keyOf(owner));
+  } catch {
+    return null;
+  }
+}
+
+/**
+ * What stands in a text, if it is a basket. The shape is loaded when a basket is first read: the storefront's first load
+ * has no use for it.
+ */
+async function checked(text: string): Promise<BasketDraft | null> {
+  const { basketDraft } = await import('./basket-draft.shape');
+  try {
+    return basketDraft.safeParse(JSON.parse(text)).data ?? null;
+  } catch {
+    // What can't be read is no basket.
+    return null;
   }
 }

@@ -1,11 +1,14 @@
 import { inject } from '@angular/core';
 import { createEffect } from '@ngrx/effects';
 import { Store } from '@ngrx/store';
-import { concat, distinctUntilChanged, filter, map, of, switchMap, tap } from 'rxjs';
-import { selectPerson } from '@seamwright/identity/data-access';
+import { distinctUntilChanged, filter, map, of, retry, switchMap, tap } from 'rxjs';
+import { selectPerson } from '@seamwright/identity/data-access/session';
 import { BasketStorageActions } from './basket.actions';
 import { BasketStorage } from './basket-storage';
 import { basketFeature } from './basket.feature';
+
+/** How long until a basket is read again whose shape could not be loaded. */
+const RETRY_MS = 3_000;
 
 /** Brings a person's basket back when they sign in, and what another tab does to it meanwhile. */
 const restore = createEffect(
@@ -16,7 +19,8 @@ const restore = createEffect(
       switchMap((owner) =>
         owner === null
           ? of(BasketStorageActions.putAway())
-          : concat(of(storage.read(owner)), storage.changesElsewhere(owner)).pipe(
+          : storage.baskets(owner).pipe(
+              retry({ delay: RETRY_MS }),
               map((draft) => BasketStorageActions.restored({ owner, draft })),
             ),
       ),

@@ -1,13 +1,14 @@
 import { TestBed } from '@angular/core/testing';
 import { provideEffects } from '@ngrx/effects';
-import { provideState, provideStore, Store } from '@ngrx/store';
-import { sessionFeature, selectPerson } from '@seamwright/identity/data-access';
+import { provideState, provideStore, Store, type Action } from '@ngrx/store';
+import { sessionFeature, selectPerson } from '@seamwright/identity/data-access/session';
 import { provideMockStore, MockStore } from '@ngrx/store/testing';
-import { firstValueFrom, take, toArray } from 'rxjs';
+import { firstValueFrom, take, toArray, type Observable } from 'rxjs';
 import { BasketActions, BasketStorageActions } from './basket.actions';
 import { emptyDraft, type BasketLine } from './basket-draft';
 import { basketEffects } from './basket.effects';
 import { basketFeature } from './basket.feature';
+import { basketRestored } from './basket.guards';
 import { BasketStorage } from './basket-storage';
 
 const steak = (stated: Partial<BasketLine> = {}): Omit<BasketLine, 'id'> => ({
@@ -22,6 +23,10 @@ const steak = (stated: Partial<BasketLine> = {}): Omit<BasketLine, 'id'> => ({
   ...stated,
 });
 const ANNA = 'anna';
+
+async function until(met: () => boolean): Promise<void> {
+  while (!met()) await new Promise((resolve) => setTimeout(resolve));
+}
 
 beforeEach(() => localStorage.clear());
 
@@ -92,19 +97,20 @@ describe('the basket', () => {
 });
 
 describe('the device', () => {
-  it('gives back what was kept for a person, and only what is a basket', () => {
+  it('gives back what was kept for a person, and only what is a basket', async () => {
     const storage = TestBed.inject(BasketStorage);
     const kept = { ...emptyDraft('key-12345'), lines: [{ ...steak(), id: 'line' }] };
     storage.write(ANNA, kept);
-    expect(storage.read(ANNA)).toEqual(kept);
-    expect(storage.read('ben').lines).toEqual([]);
+    expect(await storage.read(ANNA)).toEqual(kept);
+    expect((await storage.read('ben')).lines).toEqual([]);
     localStorage.setItem('seamwright-basket:ben', '{"lines":[{"price":1}]}');
-    expect(storage.read('ben').lines).toEqual([]);
+    expect((await storage.read('ben')).lines).toEqual([]);
     localStorage.setItem('seamwright-basket:ben', 'not JSON');
-    expect(storage.read('ben').key).not.toBe('');
+    const { key, lines } = await storage.read('ben');
+    expect([key === '', lines]).toEqual([false, []]);
   });
 
-  it('keeps the basket through a sign-out and brings it back at the next sign-in', () => {
+  it('keeps the basket through a sign-out and brings it back at the next sign-in', async () => {
     TestBed.configureTestingModule({
       providers: [
         provideStore(),
@@ -115,12 +121,12 @@ describe('the device', () => {
     });
     const store = TestBed.inject(Store);
     const storage = TestBed.inject(BasketStorage);
-    store.dispatch(BasketStorageActions.restored({ owner: ANNA, draft: storage.read(ANNA) }));
+    store.dispatch(BasketStorageActions.restored({ owner: ANNA, draft: await storage.read(ANNA) }));
     store.dispatch(BasketActions.lineAdded(steak()));
-    const { key } = storage.read(ANNA);
+    const { key } = await storage.read(ANNA);
     store.dispatch(BasketStorageActions.putAway());
     expect(store.selectSignal(basketFeature.selectCount)()).toBe(0);
-    expect(storage.read(ANNA)).toMatchObject({ key, lines: [{ code: 'BF-901' }] });
+    expect(await storage.read(ANNA)).toMatchObject({ key, lines: [{ code: 'BF-901' }] });
   });
 
   it('brings the basket of whoever signs in, and what another tab does to it', async () => {
@@ -129,14 +135,52 @@ describe('the device', () => {
     const storage = TestBed.inject(BasketStorage);
     const anna = { id: ANNA } as NonNullable<ReturnType<typeof selectPerson>>;
     store.overrideSelector(selectPerson, anna);
-    const told = firstValueFrom(basketEffects.restore(store, storage).pipe(take(2), toArray()));
+    const told: Action[] = [];
+    const telling = basketEffects.restore(store, storage).subscribe((action) => told.push(action));
+    await until(() => told.length === 1);
     storage.write(ANNA, { ...emptyDraft('of-the-other-tab'), note: 'changed there' });
     window.dispatchEvent(new StorageEvent('storage', { key: `seamwright-basket:${ANNA}` }));
-    const [first, second] = await told;
+    await until(() => told.length === 2);
+    telling.unsubscribe();
+    const [first, second] = told;
     expect(first).toMatchObject({ type: BasketStorageActions.restored.type, owner: ANNA });
     expect(second).toMatchObject({ draft: { key: 'of-the-other-tab', note: 'changed there' } });
     store.overrideSelector(selectPerson, null);
     const [away] = await firstValueFrom(basketEffects.restore(store, storage).pipe(take(1), toArray()));
     expect(away).toEqual(BasketStorageActions.putAway());
+  });
+
+  it('is asked again when a basket could not be read, and gives nobody an empty one meanwhile', async () => {
+    jest.useFakeTimers();
+    try {
+      TestBed.configureTestingModule({ providers: [provideMockStore()] });
+      const store = TestBed.inject(MockStore);
+      store.overrideSelector(selectPerson, { id: ANNA } as NonNullable<ReturnType<typeof selectPerson>>);
+      const storage = TestBed.inject(BasketStorage);
+      const draft = emptyDraft('key-12345');
+      jest.spyOn(storage, 'read').mockRejectedValueOnce(new Error('not loaded')).mockResolvedValue(draft);
+      const told: Action[] = [];
+      const telling = basketEffects.restore(store, storage).subscribe((action) => told.push(action));
+      await jest.advanceTimersByTimeAsync(2_000);
+      expect(told).toEqual([]);
+      await jest.advanceTimersByTimeAsync(2_000);
+      expect(told).toEqual([BasketStorageActions.restored({ owner: ANNA, draft })]);
+      telling.unsubscribe();
+    } finally {
+      jest.useRealTimers();
+    }
+  });
+});
+
+describe('a page that shows the basket', () => {
+  it('opens once the basket is back', () => {
+    TestBed.configureTestingModule({ providers: [provideStore(), provideState(basketFeature)] });
+    const opened: unknown[] = [];
+    TestBed.runInInjectionContext(() => basketRestored({} as never, {} as never) as Observable<unknown>).subscribe(
+      (may) => opened.push(may),
+    );
+    expect(opened).toEqual([]);
+    TestBed.inject(Store).dispatch(BasketStorageActions.restored({ owner: ANNA, draft: emptyDraft('key-12345') }));
+    expect(opened).toEqual([true]);
   });
 });
