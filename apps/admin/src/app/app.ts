@@ -2,13 +2,13 @@ import { ChangeDetectionStrategy, Component, computed, inject } from '@angular/c
 import { RouterLink } from '@angular/router';
 import { Store } from '@ngrx/store';
 import { SessionActions, selectPerson, selectRoles } from '@seamwright/identity/data-access/session';
-import { AdminShell, Disclosure, Icon, MenuItem, type NavLink } from '@seamwright/shared/ui/frame';
+import { AdminShell, Disclosure, FrameIcon, MenuItem, type NavLink } from '@seamwright/shared/ui/frame';
 import { placesOf } from './places';
 
 /** The desk's application: its frame around the routed page. */
 @Component({
   selector: 'sw-root',
-  imports: [AdminShell, Disclosure, Icon, MenuItem, RouterLink],
+  imports: [AdminShell, Disclosure, FrameIcon, MenuItem, RouterLink],
   template: `
     <sw-admin-shell [links]="links()">
       @if (person(); as known) {

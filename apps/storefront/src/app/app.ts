@@ -3,13 +3,13 @@ import { RouterLink } from '@angular/router';
 import { Store } from '@ngrx/store';
 import { SessionActions, selectPerson, selectRoles } from '@seamwright/identity/data-access/session';
 import { basketFeature } from '@seamwright/ordering/data-access/frame';
-import { Disclosure, Icon, MenuItem, StorefrontShell, type NavLink } from '@seamwright/shared/ui/frame';
+import { Disclosure, FrameIcon, MenuItem, StorefrontShell, type NavLink } from '@seamwright/shared/ui/frame';
 import { NextDeliverySlot } from './next-delivery-slot';
 
 /** The buyers' application: its frame around the routed page. */
 @Component({
   selector: 'sw-root',
-  imports: [Disclosure, Icon, MenuItem, NextDeliverySlot, RouterLink, StorefrontShell],
+  imports: [Disclosure, FrameIcon, MenuItem, NextDeliverySlot, RouterLink, StorefrontShell],
   templateUrl: './app.html',
   styleUrl: './app.scss',
   changeDetection: ChangeDetectionStrategy.OnPush,

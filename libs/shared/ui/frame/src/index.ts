@@ -3,7 +3,7 @@
 export { AdminShell } from '../../src/shell/admin-shell';
 export { CutOff } from '../../src/shell/cut-off';
 export { Disclosure } from '../../src/shell/disclosure';
-export { Icon } from '../../src/icons/icon';
+export { FrameIcon } from '../../src/icons/frame-icon';
 export { MenuItem } from '../../src/shell/menu-item';
 export type { NavLink } from '../../src/shell/nav-link';
 export { provideHeadingFocus } from '../../src/shell/heading-focus';

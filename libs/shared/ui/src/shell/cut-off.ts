@@ -1,12 +1,12 @@
 import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
-import { Icon } from '../icons/icon';
+import { FrameIcon } from '../icons/frame-icon';
 import { DatePipe } from '../numbers/date.pipe';
 import { timeLeft } from './time-left';
 
 /** The next delivery day and the time left to order for it, always in the buyers' bar. */
 @Component({
   selector: 'sw-cut-off',
-  imports: [DatePipe, Icon],
+  imports: [DatePipe, FrameIcon],
   template: `
     <sw-icon name="clock" />
     <span class="words">

@@ -1,6 +1,6 @@
 import { ChangeDetectionStrategy, Component, ElementRef, inject, input, signal, viewChild } from '@angular/core';
-import { Icon } from '../icons/icon';
-import type { IconName } from '../icons/icon-shapes';
+import { FrameIcon } from '../icons/frame-icon';
+import type { FrameIconName } from '../icons/frame-icon-shapes';
 
 let made = 0;
 
@@ -10,7 +10,7 @@ let made = 0;
  */
 @Component({
   selector: 'sw-disclosure',
-  imports: [Icon],
+  imports: [FrameIcon],
   template: `
     <button
       #button
@@ -38,7 +38,7 @@ let made = 0;
 })
 export class Disclosure {
   readonly label = input.required<string>();
-  readonly icon = input.required<IconName>();
+  readonly icon = input.required<FrameIconName>();
   /** Shows the icon alone; the label is still read out. */
   readonly wordless = input(false);
 
