@@ -18,7 +18,8 @@ const AT_ONCE = new Set(['import-statement', 'import-rule', 'require-call']);
 /** Modules that belong to pages. What `ALLOWED` names may come along nevertheless. */
 const UNWANTED = [
   { pattern: /^libs\/[^/]+\/feature-/, why: 'features load with their route' },
-  { pattern: /^libs\/[^/]+\/contracts\//, why: 'the shell needs nothing but the session of the contracts' },
+  { pattern: /^libs\/[^/]+\/contracts\//, why: 'the shell needs nothing but the session’s addresses of the contracts' },
+  { pattern: /node_modules\/zod\//, why: 'shapes are loaded with the page whose calls or drafts they check' },
   { pattern: /^libs\/[^/]+\/(domain|ui)\/src\/(chart|drawing)/, why: 'charts and drawings load when they are shown' },
   {
     pattern: /node_modules\/@angular\/material\/(fesm2022\/)?_?(dialog|form-field|table)\b/,
@@ -26,11 +27,7 @@ const UNWANTED = [
   },
 ];
 
-const ALLOWED = [
-  /^libs\/shared\/contracts\//,
-  /^libs\/identity\/contracts\/session\//,
-  /^libs\/identity\/contracts\/src\/session\.endpoints\.ts$/,
-];
+const ALLOWED = [/^libs\/identity\/contracts\/session\//, /^libs\/identity\/contracts\/src\/session\.addresses\.ts$/];
 
 /**
  * The files of the first load: the page's own and what they import statically.

@@ -30,8 +30,8 @@ const metafile = (shell: Record<string, number> = {}): Metafile => ({
       inputs: holding({
         'node_modules/@angular/core/fesm2022/core.mjs': 600,
         'node_modules/@angular/core/fesm2022/signals.mjs': 200,
-        'libs/identity/contracts/src/session.endpoints.ts': 100,
-        'libs/shared/contracts/src/wire.ts': 100,
+        'libs/identity/contracts/src/session.addresses.ts': 100,
+        'libs/shared/util/src/money.ts': 100,
         'libs/ordering/contracts/src/index.ts': 0,
         ...shell,
       }),
@@ -59,13 +59,15 @@ it('adds up what goes through the network and shares it out by package and room'
   const { bytes, heaviest, strangers } = examine(metafile(), transferOf);
   expect(bytes).toBe(570);
   expect(heaviest[0]).toEqual({ input: '@angular/core', bytes: 400 });
-  expect(heaviest).toContainEqual({ input: 'libs/shared/contracts', bytes: 50 });
+  expect(heaviest).toContainEqual({ input: 'libs/shared/util', bytes: 50 });
   expect(heaviest.reduce((sum, one) => sum + one.bytes, 0)).toBe(570);
   expect(strangers).toEqual([]);
 });
 
 it.each([
   ['libs/ordering/contracts/src/orders.endpoints.ts', 'the session'],
+  ['libs/shared/contracts/src/wire.ts', 'the session'],
+  ['node_modules/zod/v4/core/schemas.js', 'they check'],
   ['libs/ordering/feature-basket/src/basket.page.ts', 'with their route'],
   ['libs/catalogue/domain/src/drawing/views.ts', 'when they are shown'],
   ['node_modules/@angular/material/fesm2022/dialog.mjs', 'the page that shows them'],

@@ -4,6 +4,7 @@ import { existsSync } from 'node:fs';
 import { join } from 'node:path';
 import { alone } from '../start/lock.mjs';
 import { Told, checkout, isMain, lastLines, runMain, runMeanwhile } from '../start/system.mjs';
+import { checkBudget, limits } from './budgets.mjs';
 import digest from './digest.cjs';
 import { isFresh, removeStamp, writeStamp } from './stamp.mjs';
 import { applicationInputs, browserFolder, bundleInputs, bundles, targetNames } from './targets.mjs';
@@ -41,7 +42,7 @@ export function build({ root = checkout, only = targetNames, force = false, log 
 async function buildAlone({ root, only, force, log, signal }) {
   const done = { built: [], fresh: [] };
   for (const name of targetNames.filter((one) => only.includes(one))) {
-    const target = describeTarget(root, name);
+    const target = describeTarget(root, name, log);
     if (!force && isFresh(root, target)) {
       done.fresh.push(name);
       continue;
@@ -57,9 +58,9 @@ async function buildAlone({ root, only, force, log, signal }) {
   return done;
 }
 
-function describeTarget(root, name) {
+function describeTarget(root, name, log) {
   const bundle = bundles.find((one) => one.name === name);
-  return bundle ? bundleTarget(root, bundle) : applicationTarget(root, name);
+  return bundle ? bundleTarget(root, bundle) : applicationTarget(root, name, log);
 }
 
 function bundleTarget(root, { name, entries }) {
@@ -87,20 +88,26 @@ function bundleTarget(root, { name, entries }) {
 
 const withoutEnding = (entries) => Object.entries(entries).map(([out, source]) => ({ out, in: source }));
 
-function applicationTarget(root, name) {
+function applicationTarget(root, name, log) {
   const inputs = () => applicationInputs(root, name);
-  const settings = 'production';
+  const configuration = 'production';
+  const settings = `${configuration}, first load at most ${limits[name]}`;
   const make = async (signal) => {
     const files = inputs();
     const hash = digest.digestOf(root, files, settings);
     const env = { ...process.env, NG_CLI_ANALYTICS: 'false' };
-    const done = await runMeanwhile(join(root, 'node_modules/.bin/ng'), ['build', name, '--configuration', settings], {
-      cwd: root,
-      env,
-      signal,
-    });
+    const done = await runMeanwhile(
+      join(root, 'node_modules/.bin/ng'),
+      ['build', name, '--configuration', configuration],
+      {
+        cwd: root,
+        env,
+        signal,
+      },
+    );
     signal?.throwIfAborted();
     if (done.code !== 0) throw new Told(`${name} does not build:\n${lastLines(done.out + done.err, 60)}`);
+    log(checkBudget(root, name));
     return { files, hash };
   };
   return { name, outputs: [`${browserFolder(name)}/index.html`], settings, inputs, make };
