@@ -32,6 +32,8 @@ export {
   type Station,
   type TemperatureState,
 } from './cut-words';
+export { carcaseMap, regionsOf } from './carcase/carcase-map';
+export type { Curve, MapRegion, PlanarMap } from './carcase/planar-map';
 export { lineWeights, type LineWeights } from './line-weights';
 export { resolveChoices, type ResolvedSpecification } from './resolve-choices';
 export { resolveOffer, type PieceWeights, type ResolvedOffer } from './resolve-offer';

@@ -1,3 +1,5 @@
+export { CarcaseChart, type ChartRegion } from './carcase/carcase-chart';
+export { regionName } from './carcase/region-names';
 export {
   boneStateName,
   finishName,
