@@ -34,6 +34,13 @@ export {
 } from './cut-words';
 export { carcaseMap, regionsOf } from './carcase/carcase-map';
 export type { Curve, MapRegion, PlanarMap } from './carcase/planar-map';
+export type { StepChange } from './difference/step-difference';
+export {
+  versionDifference,
+  type Stated,
+  type VersionChange,
+  type VersionDifference,
+} from './difference/version-difference';
 export { lineWeights, type LineWeights } from './line-weights';
 export { resolveChoices, type ResolvedSpecification } from './resolve-choices';
 export { resolveOffer, type PieceWeights, type ResolvedOffer } from './resolve-offer';

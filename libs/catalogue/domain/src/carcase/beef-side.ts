@@ -25,7 +25,6 @@ export const BEEF_SIDE: MapPlan = {
     foreLegFront: [132, 362],
     neckSeam: [114, 282],
     chuckUnder: [318, 236],
-    clodFront: [160, 250],
     clodBack: [276, 300],
     ribUnder: [470, 222],
     loinUnder: [640, 208],
@@ -55,7 +54,7 @@ export const BEEF_SIDE: MapPlan = {
   seams: {
     neck: ['crest', [140, 190], 'neckSeam'],
     chuckRib: ['fifthRib', [322, 150], 'chuckUnder'],
-    chuckClod: ['neckSeam', 'clodFront', [236, 252], 'chuckUnder'],
+    chuckClod: ['neckSeam', [160, 250], [236, 252], 'chuckUnder'],
     clodPlate: ['chuckUnder', [306, 280], 'clodBack'],
     clodBrisket: ['clodBack', [206, 318], 'foreLegFront'],
     brisketPlate: ['clodBack', [296, 352], 'brisketMiddle'],
