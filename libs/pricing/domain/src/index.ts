@@ -1,4 +1,5 @@
 export { HOUSE_CURRENCY } from './house-currency';
+export { plateCost, portionToBuy, type Plate, type PlateCost } from './plate-cost';
 export { lineAmounts, type LineAmounts, type PricedWeights } from './line-amounts';
 export {
   PRICE_BASES,

@@ -21,4 +21,6 @@ export const pricingMessages = {
       ? $localize`This quote has already been accepted.`
       : $localize`This quote has already been declined.`,
   'quote-expired': (p) => $localize`This quote could be answered until ${p['day']}:day:. Ask your rep for a new one.`,
+  'plate-nothing-left': () => $localize`Cooking loss and waste leave nothing to serve.`,
+  'plate-food-cost': () => $localize`Say which share of the menu price the meat may cost.`,
 } satisfies MessageTable;
