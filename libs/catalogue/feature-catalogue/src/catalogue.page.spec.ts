@@ -2,7 +2,7 @@ import { provideHttpClient } from '@angular/common/http';
 import { HttpTestingController, provideHttpClientTesting } from '@angular/common/http/testing';
 import { LOCALE_ID } from '@angular/core';
 import { TestBed } from '@angular/core/testing';
-import { provideRouter, withComponentInputBinding } from '@angular/router';
+import { provideRouter, Router, withComponentInputBinding, type Routes } from '@angular/router';
 import { RouterTestingHarness } from '@angular/router/testing';
 import { provideEffects } from '@ngrx/effects';
 import { provideStore } from '@ngrx/store';
@@ -38,6 +38,9 @@ const counts = {
 };
 
 describe('the catalogue page', () => {
+  /** Lets the page of a specification be loaded. */
+  let loaded: () => void;
+
   const open = async (address: string) => {
     TestBed.configureTestingModule({
       providers: [
@@ -46,7 +49,16 @@ describe('the catalogue page', () => {
         provideHttpClientTesting(),
         provideStore(),
         provideEffects(),
-        provideRouter([{ path: 'catalogue', children: catalogueRoutes }], withComponentInputBinding()),
+        provideRouter(
+          [
+            { path: 'catalogue', pathMatch: 'full', children: catalogueRoutes },
+            {
+              path: 'catalogue/:code',
+              loadChildren: () => new Promise<Routes>((resolve) => (loaded = () => resolve([]))),
+            },
+          ],
+          withComponentInputBinding(),
+        ),
       ],
     });
     const harness = await RouterTestingHarness.create(address);
@@ -65,6 +77,24 @@ describe('the catalogue page', () => {
     expect(link('Lamb')?.textContent).toContain('0');
     expect(link('Beef', '.groups')?.getAttribute('aria-current')).toBe('true');
     expect(link('Beef', '.groups')?.getAttribute('href')).toBe('/catalogue?q=strip&bone=nonsense');
+  });
+
+  it('does not call the buyer back with words that come to rest while a card is being opened', async () => {
+    const { harness, http, host, link } = await open('/catalogue');
+    http.expectOne('/api/v1/specifications').flush({ items: [card], nextCursor: null, counts });
+    await harness.fixture.whenStable();
+    const router = TestBed.inject(Router);
+    jest.useFakeTimers();
+    const field = host.querySelector<HTMLInputElement>('input[type=search]');
+    if (field) field.value = 'strip';
+    field?.dispatchEvent(new Event('input'));
+    // The page that is opened takes longer to load than words take to rest.
+    link('Striploin steak')?.dispatchEvent(new MouseEvent('click', { bubbles: true, cancelable: true, button: 0 }));
+    await jest.advanceTimersByTimeAsync(300);
+    jest.useRealTimers();
+    loaded();
+    await harness.fixture.whenStable();
+    expect(router.url).toBe('/catalogue/BF-201');
   });
 
   it('folds the filters away on a small screen, with those that are on still there to take off', async () => {

@@ -14,6 +14,7 @@ import { CardPrices } from './card-prices';
 import { CatalogueSearch } from './catalogue-search';
 import { SpecificationCardLink } from './specification-card';
 
+const pathOf = (url: string): string | undefined => url.split(/[?#]/)[0];
 const oneOf = <T extends string>(list: readonly T[], value: string | undefined): T | undefined =>
   list.find((each) => each === value);
 
@@ -65,6 +66,9 @@ export class CataloguePage {
   }
 
   protected search(words: string): void {
+    // Words that come to rest while a page is being opened must not call the buyer back from it.
+    const going = this.#router.currentNavigation();
+    if (going && pathOf(this.#router.serializeUrl(going.extractedUrl)) !== pathOf(this.#router.url)) return;
     void this.#router.navigate([], {
       queryParams: { q: words || null },
       queryParamsHandling: 'merge',
