@@ -3,6 +3,8 @@ export { BankStatements } from './bank-statements';
 export { CardsApiActions, CardsPageActions, type CardEntry } from './cards/cards.actions';
 export { cardsEffects } from './cards/cards.effects';
 export { cardsFeature } from './cards/cards.feature';
+export { OrderCards } from './cards/order-cards';
+export { PaymentCards } from './cards/payment-cards';
 export { InvoiceListPageActions, InvoicePageActions, type InvoiceSearch } from './invoices/invoices.actions';
 export { invoicesEffects } from './invoices/invoices.effects';
 export { invoicesFeature } from './invoices/invoices.feature';

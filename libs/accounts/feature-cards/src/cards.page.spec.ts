@@ -1,7 +1,7 @@
 import { provideHttpClient } from '@angular/common/http';
 import { HttpTestingController, provideHttpClientTesting } from '@angular/common/http/testing';
 import { DeferBlockState, TestBed } from '@angular/core/testing';
-import { provideRouter } from '@angular/router';
+import { provideRouter, Router } from '@angular/router';
 import { provideEffects } from '@ngrx/effects';
 import { provideState, provideStore } from '@ngrx/store';
 import { cardsEffects, cardsFeature } from '@seamwright/accounts/data-access';
@@ -16,12 +16,12 @@ const loader = jest.fn();
 describe('the page of cards', () => {
   let http: HttpTestingController;
 
-  async function opened(mode: 'demo' | 'live', items: object[] = [visa]) {
+  async function opened(mode: 'demo' | 'live', items: object[] = [visa], back = '') {
     TestBed.configureTestingModule({
       providers: [
         provideHttpClient(),
         provideHttpClientTesting(),
-        provideRouter([]),
+        provideRouter([{ path: '**', children: [] }]),
         provideStore(),
         provideState(cardsFeature),
         provideEffects(cardsEffects),
@@ -31,6 +31,7 @@ describe('the page of cards', () => {
     });
     http = TestBed.inject(HttpTestingController);
     const fixture = TestBed.createComponent(CardsPage);
+    fixture.componentRef.setInput('back', back);
     const page: HTMLElement = fixture.nativeElement;
     const words = () => (page.textContent ?? '').replace(/\s+/g, ' ');
     const press = async (text: string) => {
@@ -59,6 +60,22 @@ describe('the page of cards', () => {
     await fixture.whenStable();
     expect(words()).toContain('Visa ···· 4242');
     expect(words()).not.toContain('This is a demo');
+  });
+
+  it.each([
+    ['/orders/0f6b', '/orders/0f6b'],
+    ['/basket', '/basket'],
+    ['https://elsewhere.example', '/'],
+    ['/orders/0f6b/../../team', '/'],
+  ])('sent here from %s, leads to %s once a card is kept', async (back, url) => {
+    const { fixture, page, press } = await opened('demo', [], back);
+    await press('Add a card');
+    page.querySelector<HTMLInputElement>('input[type=radio]')?.click();
+    await fixture.whenStable();
+    await press('Keep this card');
+    http.expectOne({ method: 'POST', url: '/api/v1/cards' }).flush(visa);
+    await fixture.whenStable();
+    expect(TestBed.inject(Router).url).toBe(url);
   });
 
   it('sends the same key again after a lost answer, and a new one after a refusal', async () => {

@@ -24,6 +24,11 @@ const TEST_METHODS: readonly { readonly methodId: string; readonly label: string
     does: $localize`:@@accounts.demoCard.funds.does:declined: not enough money`,
   },
   {
+    methodId: 'pm_card_chargeCustomerFail',
+    label: $localize`:@@accounts.demoCard.later:Visa, later`,
+    does: $localize`:@@accounts.demoCard.later.does:kept, but orders are declined`,
+  },
+  {
     methodId: 'pm_card_authenticationRequired',
     label: $localize`:@@accounts.demoCard.confirm:Visa, to confirm`,
     does: $localize`:@@accounts.demoCard.confirm.does:the bank asks its holder`,

@@ -4,6 +4,7 @@ import { provideRouter } from '@angular/router';
 import { provideEffects } from '@ngrx/effects';
 import { provideState, provideStore, Store } from '@ngrx/store';
 import { of } from 'rxjs';
+import { PaymentCards } from '@seamwright/accounts/data-access';
 import type { OrderDetail } from '@seamwright/ordering/contracts';
 import {
   BasketActions,
@@ -16,7 +17,6 @@ import {
 import { PriceChecks, type PriceCheck } from '@seamwright/pricing/data-access';
 import { QuantityHarness } from '@seamwright/shared/ui/forms';
 import { BasketPage } from './basket.page';
-import { PaymentCards } from './payment-cards';
 
 const price = {
   basis: 'kg',

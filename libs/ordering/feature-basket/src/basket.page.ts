@@ -8,6 +8,8 @@ import { Router, RouterLink } from '@angular/router';
 import { Actions, ofType } from '@ngrx/effects';
 import { Store } from '@ngrx/store';
 import { catchError, of } from 'rxjs';
+import { PaymentCards } from '@seamwright/accounts/data-access';
+import { CardPicker } from '@seamwright/accounts/ui';
 import {
   BasketActions,
   basketFeature,
@@ -23,8 +25,6 @@ import { Card, Empty, ErrorState, Loading, Money, PageHead, Toast } from '@seamw
 import { Choice, type ChoiceOption } from '@seamwright/shared/ui/forms';
 import { formatPlantDate, isPlantDate } from '@seamwright/shared/util';
 import { BasketLineRow } from './basket-line-row';
-import { CardPicker } from './card-picker';
-import { PaymentCards } from './payment-cards';
 
 /** The basket and its checkout on one page: what, when, where, how it is paid, and what it will come to. */
 @Component({

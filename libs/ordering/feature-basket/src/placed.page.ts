@@ -2,6 +2,8 @@ import { ChangeDetectionStrategy, Component, effect, inject, input, untracked } 
 import { MatButton } from '@angular/material/button';
 import { RouterLink } from '@angular/router';
 import { Store } from '@ngrx/store';
+import { OrderCards } from '@seamwright/accounts/data-access';
+import { OrderCard } from '@seamwright/accounts/ui';
 import type { OrderDetail } from '@seamwright/ordering/contracts';
 import { OrderPageActions, ordersFeature } from '@seamwright/ordering/data-access';
 import { OrderPayment, OrderSeam, OrderTotalsBox } from '@seamwright/ordering/ui';
@@ -12,7 +14,19 @@ import { formatPlantDate, isPlantDate } from '@seamwright/shared/util';
 /** What became of the basket: the order with its seam, and how the card stands. */
 @Component({
   selector: 'sw-placed-page',
-  imports: [Card, ErrorState, Loading, MatButton, OrderPayment, OrderSeam, OrderTotalsBox, PageHead, RouterLink],
+  imports: [
+    Card,
+    ErrorState,
+    Loading,
+    MatButton,
+    OrderCard,
+    OrderPayment,
+    OrderSeam,
+    OrderTotalsBox,
+    PageHead,
+    RouterLink,
+  ],
+  providers: [OrderCards],
   templateUrl: './placed.page.html',
   changeDetection: ChangeDetectionStrategy.OnPush,
 })
@@ -22,6 +36,7 @@ export class PlacedPage {
   private readonly store = inject(Store);
 
   protected readonly order = this.store.selectSignal(ordersFeature.selectOrder);
+  protected readonly orderCards = inject(OrderCards);
   protected readonly currency = HOUSE_CURRENCY;
 
   constructor() {

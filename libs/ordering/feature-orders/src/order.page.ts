@@ -12,6 +12,8 @@ import { takeUntilDestroyed } from '@angular/core/rxjs-interop';
 import { MatButton } from '@angular/material/button';
 import { Actions, ofType } from '@ngrx/effects';
 import { Store } from '@ngrx/store';
+import { OrderCards } from '@seamwright/accounts/data-access';
+import { OrderCard } from '@seamwright/accounts/ui';
 import type { OrderDetail } from '@seamwright/ordering/contracts';
 import { OrderPageActions, OrdersApiActions, ordersFeature } from '@seamwright/ordering/data-access';
 import {
@@ -34,6 +36,7 @@ import { formatPlantDate, isPlantDate } from '@seamwright/shared/util';
     ErrorState,
     Loading,
     MatButton,
+    OrderCard,
     OrderHistory,
     OrderLines,
     OrderPayment,
@@ -43,6 +46,7 @@ import { formatPlantDate, isPlantDate } from '@seamwright/shared/util';
     PageHead,
     Stale,
   ],
+  providers: [OrderCards],
   templateUrl: './order.page.html',
   styleUrl: './order.page.scss',
   changeDetection: ChangeDetectionStrategy.OnPush,
@@ -57,7 +61,10 @@ export class OrderPage {
 
   protected readonly order = this.store.selectSignal(ordersFeature.selectOrder);
   protected readonly cancelling = this.store.selectSignal(ordersFeature.selectCancelling);
-  protected readonly stale = computed(() => this.cancelling().problem?.code === 'stale');
+  protected readonly orderCards = inject(OrderCards);
+  protected readonly stale = computed(() =>
+    [this.cancelling(), this.orderCards.paying()].some(({ problem }) => problem?.code === 'stale'),
+  );
   protected readonly currency = HOUSE_CURRENCY;
   protected readonly crumbs = [{ label: $localize`:@@order.crumb:Orders`, path: '/orders' }];
 

@@ -56,13 +56,13 @@ export function paymentWords(payment: ShownPayment | null, currency: CurrencyCod
       return {
         tone: 'bad',
         word: $localize`:@@order.payment.declined:Card declined`,
-        text: $localize`:@@order.payment.declined.text:The bank declined to hold ${held}:amount:. Nothing was charged, and the order is not confirmed. Cancel it and order again with another card or on account, or ring the desk.`,
+        text: $localize`:@@order.payment.declined.text:The bank declined to hold ${held}:amount:. Nothing was charged, and the order waits until another card is held.`,
       };
     case 'failed':
       return {
         tone: 'bad',
         word: $localize`:@@order.payment.failed:Card not held`,
-        text: $localize`:@@order.payment.failed.text:The card could not be held or charged. Ring the desk to settle this order another way.`,
+        text: $localize`:@@order.payment.failed.text:The card could not be held or charged. If the order can’t be paid with another card, the desk settles it another way.`,
       };
     case 'needs-action':
       return {

@@ -1,6 +1,6 @@
 import { inject, Injectable } from '@angular/core';
 import { map, type Observable } from 'rxjs';
-import { listCards, type CardWire } from '@seamwright/accounts/contracts';
+import { listCards, listPayments, type CardWire } from '@seamwright/accounts/contracts';
 import { ApiClient } from '@seamwright/shared/data-access';
 
 /** The cards that the buyer's customer keeps, to choose from when an order is paid by card. */
@@ -10,5 +10,12 @@ export class PaymentCards {
 
   list(): Observable<readonly CardWire[]> {
     return this.#api.call(listCards, {}).pipe(map(({ items }) => items));
+  }
+
+  /** Where the bank asks the holder to confirm the newest payment of an order; empty when it does not. */
+  confirmationOf(orderId: string): Observable<string> {
+    return this.#api
+      .call(listPayments, { query: { orderId, limit: 1 } })
+      .pipe(map(({ items: [newest] }) => newest?.actionUrl ?? ''));
   }
 }
