@@ -16,6 +16,7 @@ export {
   type NewPerson,
   type PersonRecord,
 } from './people/people.repository';
+export { buyersOf, type Addressee } from './people/buyers.repository';
 export { addPerson } from './people/invite-person';
 export { tidyIdentity } from './tidy-identity';
 export { authenticateBearer } from './tokens/authenticate-bearer';

@@ -11,7 +11,7 @@ export interface NewMail {
   readonly text: string;
   readonly customerId: string | null;
   readonly documentId?: string;
-  /** The fact that is told, so that it is told once: `order-confirmation:<id>`. */
+  /** The fact that is told, so that it is told once: `order-confirmation:<id>:<whose>`. */
   readonly dedupeKey: string;
 }
 
