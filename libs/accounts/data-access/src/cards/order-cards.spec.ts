@@ -3,10 +3,13 @@ import { provideEffects } from '@ngrx/effects';
 import { provideState, provideStore, Store } from '@ngrx/store';
 import { of, throwError, type Observable } from 'rxjs';
 import { listCards, listPayments } from '@seamwright/accounts/contracts';
-import { getOrder, payOrderWith } from '@seamwright/ordering/contracts';
 import { OrderPageActions, ordersEffects, ordersFeature } from '@seamwright/ordering/data-access';
 import { ApiClient, LiveEvents } from '@seamwright/shared/data-access';
 import { OrderCards } from './order-cards';
+
+// Declared in ordering's contracts, which this room does not reach.
+const GET_ORDER = 'orders.get';
+const PAY_WITH = 'orders.pay-with';
 
 const order = (state: string | null, changed: object = {}) => ({
   id: 'a',
@@ -26,8 +29,8 @@ let answers: Record<string, () => Observable<unknown>>;
 function open(shown: object): { cards: OrderCards; store: Store } {
   calls = [];
   answers = {
-    [getOrder.id]: () => of(shown),
-    [payOrderWith.id]: () => of(order('started', { rowVersion: 5 })),
+    [GET_ORDER]: () => of(shown),
+    [PAY_WITH]: () => of(order('started', { rowVersion: 5 })),
     [listCards.id]: () => of({ items: [visa] }),
     [listPayments.id]: () => of({ items: [{ actionUrl: bank }] }),
   };
@@ -75,7 +78,7 @@ describe('the card of an open order', () => {
     const { cards } = open(order('declined'));
     expect(cards.declineCode()).toBe('insufficient_funds');
     cards.payWith('visa');
-    expect(inputsOf(payOrderWith)).toEqual([{ params: { orderId: 'a' }, ifMatch: 4, body: { cardId: 'visa' } }]);
+    expect(inputsOf({ id: PAY_WITH })).toEqual([{ params: { orderId: 'a' }, ifMatch: 4, body: { cardId: 'visa' } }]);
     expect(cards.mayTry()).toBe(false);
   });
 
@@ -88,7 +91,7 @@ describe('the card of an open order', () => {
 
   it('leads nowhere when the payment can’t be fetched', () => {
     const { cards, store } = open(order('started'));
-    answers[getOrder.id] = () => of(order('needs-action'));
+    answers[GET_ORDER] = () => of(order('needs-action'));
     answers[listPayments.id] = () => throwError(() => new Error('offline'));
     store.dispatch(OrderPageActions.opened({ orderId: 'a' }));
     TestBed.tick();
