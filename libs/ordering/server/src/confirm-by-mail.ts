@@ -2,7 +2,7 @@ import { inTransaction, queueMail, system, type Subscriber } from '@seamwright/s
 import { confirmationMail } from './confirmation-mail';
 import { orderById } from './orders.repository';
 import type { CardPort } from './ports';
-import { confirmationRecipient } from './recipients.repository';
+import { confirmationRecipients } from './recipients.repository';
 
 /** Mails the confirmation once an order waits for nothing any more. */
 export const confirmByMail = (cards: CardPort): Subscriber => ({
@@ -11,16 +11,15 @@ export const confirmByMail = (cards: CardPort): Subscriber => ({
   async handle({ database, clock }, event) {
     const now = await clock.now();
     await inTransaction(database, system('job'), async (tx) => {
-      const recipient = await confirmationRecipient(tx, event.subjectId);
-      if (!recipient) return;
       const order = await orderById(tx, event.subjectId);
       const card = (await cards.stateOf(tx, [order.id])).get(order.id);
-      await queueMail(tx, now, {
-        to: recipient.email,
-        ...confirmationMail(order, recipient, card),
-        customerId: order.customerId,
-        dedupeKey: `order-confirmation:${order.id}`,
-      });
+      for (const recipient of await confirmationRecipients(tx, order))
+        await queueMail(tx, now, {
+          to: recipient.email,
+          ...confirmationMail(order, recipient, card),
+          customerId: order.customerId,
+          dedupeKey: `order-confirmation:${order.id}:${recipient.id}`,
+        });
     });
   },
 });

@@ -1,13 +1,19 @@
+import { buyersOf, customerById, type Addressee } from '@seamwright/identity/server';
+import type { OrderWithLines } from '@seamwright/ordering/domain';
 import type { Tx } from '@seamwright/shared/server';
 
-/** Where the confirmation of an order goes: to the buyer who placed it, else to the customer's address for papers. */
-export async function confirmationRecipient(tx: Tx, orderId: string): Promise<{ name: string; email: string } | null> {
-  const row = await tx
-    .selectFrom('orders as o')
-    .innerJoin('customers as c', 'c.id', 'o.customerId')
-    .leftJoin('people as p', (join) => join.onRef('p.id', '=', 'o.placedBy').onRef('p.customerId', '=', 'o.customerId'))
-    .select(['c.name', 'c.invoiceEmail', 'p.name as buyer', 'p.email'])
-    .where('o.id', '=', orderId)
-    .executeTakeFirst();
-  return row ? { name: row.buyer ?? row.name, email: row.email ?? row.invoiceEmail } : null;
+/**
+ * Who is told that an order is confirmed: the buyer who placed it. One that the desk took is told to everybody who
+ * orders for its site, and where nobody does, to the customer's address for papers.
+ */
+export async function confirmationRecipients(
+  tx: Tx,
+  { customerId, siteId, placedBy }: Pick<OrderWithLines, 'customerId' | 'siteId' | 'placedBy'>,
+): Promise<readonly Addressee[]> {
+  const buyers = await buyersOf(tx, customerId, siteId);
+  const own = buyers.filter(({ id }) => id === placedBy);
+  if (own.length > 0) return own;
+  if (buyers.length > 0) return buyers;
+  const { id, name, invoiceEmail } = await customerById(tx, customerId);
+  return [{ id, name, email: invoiceEmail }];
 }

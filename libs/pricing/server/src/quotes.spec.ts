@@ -10,7 +10,7 @@ import {
 } from '@seamwright/pricing/contracts';
 import { pricingImplementations, pricingPeriodic } from './index';
 import { addTestMarket, type TestMarket } from '@seamwright/pricing/server/testing';
-import { inTransaction, system, type Caller } from '@seamwright/shared/server';
+import { inTransaction, personOf, system, type Caller } from '@seamwright/shared/server';
 import { openTestHouse, TEST_NOW, type TestHouse } from '@seamwright/shared/server/testing';
 import { newId } from '@seamwright/shared/util';
 
@@ -101,16 +101,31 @@ describe('quotes', () => {
     expect((await create(market.pubRep, { customerId: market.hotelId })).status).toBe(404);
   });
 
-  it('are mailed to the customer with prices in words and a link', async () => {
-    const { body } = await sent({ notes: 'As spoken on the phone.' });
-    const mail = await inTransaction(house.database, system('seed'), (tx) =>
-      tx.selectFrom('mails').selectAll().where('dedupeKey', '=', `quote:${body.id}`).executeTakeFirstOrThrow(),
+  const mailsOf = (quoteId: string) =>
+    inTransaction(house.database, system('seed'), (tx) =>
+      tx.selectFrom('mails').selectAll().where('dedupeKey', 'like', `quote:${quoteId}:%`).execute(),
     );
-    expect(mail).toMatchObject({ toAddress: 'test.pub@example.test', customerId: market.pubId });
-    expect(mail.subject).toBe(`Quote ${body.number} for Test pub`);
-    expect(mail.bodyText).toContain('Boneless shoulder (LM-901), 3 mm fat: £74.00 per case');
-    expect(mail.bodyText).toContain('As spoken on the phone.');
-    expect(mail.bodyText).toContain(`http://desk.test/quotes/${body.id}`);
+  const pubBuyers = (change: { active: boolean }) =>
+    inTransaction(house.database, system('seed'), (tx) =>
+      tx.updateTable('people').set(change).where('customerId', '=', market.pubId).execute(),
+    );
+
+  it('are mailed to those who may accept them, with prices in words and a link', async () => {
+    const { body } = await sent({ notes: 'As spoken on the phone.' });
+    const [mail, ...others] = await mailsOf(body.id);
+    expect(others).toEqual([]);
+    expect(mail).toMatchObject({ toAddress: `${personOf(market.pubBuyer)}@example.test`, customerId: market.pubId });
+    expect(mail?.subject).toBe(`Quote ${body.number} for Test pub`);
+    expect(mail?.bodyText).toContain('Boneless shoulder (LM-901), 3 mm fat: £74.00 per case');
+    expect(mail?.bodyText).toContain('As spoken on the phone.');
+    expect(mail?.bodyText).toContain(`http://desk.test/quotes/${body.id}`);
+  });
+
+  it('go to the address for papers while nobody buys for the customer', async () => {
+    await pubBuyers({ active: false });
+    const { body } = await sent();
+    await pubBuyers({ active: true });
+    expect((await mailsOf(body.id)).map(({ toAddress }) => toAddress)).toEqual(['test.pub@example.test']);
   });
 
   it('are sent once, and only as they were read', async () => {
