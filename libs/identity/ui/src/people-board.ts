@@ -70,11 +70,6 @@ export interface PeopleDesk {
     .edit {
       margin: calc(var(--sw-cell-block) * -1) -10px;
     }
-
-    button sw-icon {
-      margin-inline-end: 4px;
-      vertical-align: -4px;
-    }
   `,
   changeDetection: ChangeDetectionStrategy.OnPush,
 })
