@@ -21,7 +21,7 @@ export const cardName = ({ brand, last4 }: Pick<ShownCard, 'brand' | 'last4'>): 
   imports: [Choice, RouterLink],
   template: `
     @if (cards().length > 0) {
-      <sw-choice [label]="label" [options]="options()" [(value)]="cardId" />
+      <sw-choice [label]="label()" [options]="options()" [(value)]="cardId" />
     } @else {
       <p class="sw-muted" i18n="@@accounts.cardPicker.none">No card is kept for you yet.</p>
     }
@@ -51,9 +51,9 @@ export class CardPicker {
   readonly cards = input.required<readonly ShownCard[]>();
   /** Where to come back to once a card was added: "/basket". */
   readonly back = input.required<string>();
+  readonly label = input($localize`:@@accounts.cardPicker.label:Card`);
   readonly cardId = model<string | null>(null);
 
-  protected readonly label = $localize`:@@accounts.cardPicker.label:Card`;
   protected readonly options = computed<ChoiceOption[]>(() =>
     this.cards().map((card) => ({
       value: card.id,

@@ -25,7 +25,7 @@ const TEST_METHODS: readonly { readonly methodId: string; readonly label: string
   },
   {
     methodId: 'pm_card_chargeCustomerFail',
-    label: $localize`:@@accounts.demoCard.later:Visa, later`,
+    label: $localize`:@@accounts.demoCard.later:Visa, declined later`,
     does: $localize`:@@accounts.demoCard.later.does:kept, but orders are declined`,
   },
   {

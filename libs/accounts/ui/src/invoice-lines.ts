@@ -44,7 +44,13 @@ export class InvoiceLines {
     netMinor: this.netMinor(),
   }));
   protected readonly columns = computed<readonly TableColumn<ShownInvoiceLine>[]>(() => [
-    { key: 'description', label: $localize`:@@accounts.lines.description:What`, kind: 'text' },
+    {
+      key: 'description',
+      label: $localize`:@@accounts.lines.description:What`,
+      kind: 'text',
+      // A number keeps its unit: "8 mm fat" breaks after "mm".
+      value: ({ description }) => description.replace(/(\d) (?=(?:mm|g|kg)\b)/g, '$1\u00a0'),
+    },
     {
       key: 'packs',
       label: $localize`:@@accounts.lines.packs:Packs`,

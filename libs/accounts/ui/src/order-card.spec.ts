@@ -26,7 +26,7 @@ describe('the card of an order', () => {
     const { fixture, page, words, button } = await shown({ declineCode: 'insufficient_funds' });
     const chosen: string[] = [];
     fixture.componentInstance.chosen.subscribe((cardId) => chosen.push(cardId));
-    expect(words()).toContain('The bank said: not enough money on the card.');
+    expect(words()).toContain('Why: not enough money on the card.');
     expect(button()?.disabled).toBe(true);
     page.querySelectorAll<HTMLInputElement>('input[type=radio]')[1]?.click();
     await fixture.whenStable();

@@ -28,6 +28,14 @@ import { formatPlantDate, isPlantDate } from '@seamwright/shared/util';
   ],
   providers: [OrderCards],
   templateUrl: './placed.page.html',
+  styles: `
+    .pair {
+      display: grid;
+      grid-template-columns: repeat(auto-fit, minmax(min(360px, 100%), 1fr));
+      gap: 24px;
+      align-items: start;
+    }
+  `,
   changeDetection: ChangeDetectionStrategy.OnPush,
 })
 export class PlacedPage {

@@ -1,3 +1,4 @@
+import { NgTemplateOutlet } from '@angular/common';
 import {
   ChangeDetectionStrategy,
   Component,
@@ -36,6 +37,7 @@ import { formatPlantDate, isPlantDate } from '@seamwright/shared/util';
     ErrorState,
     Loading,
     MatButton,
+    NgTemplateOutlet,
     OrderCard,
     OrderHistory,
     OrderLines,

@@ -16,7 +16,7 @@ export interface OfferedDay {
   template: `<sw-choice [label]="label" [options]="options()" [(value)]="day" />`,
   styles: `
     :host {
-      --sw-choice-least: 124px;
+      --sw-choice-least: 148px;
     }
 
     @media (max-width: 599.98px) {

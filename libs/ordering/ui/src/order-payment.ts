@@ -89,6 +89,7 @@ export function paymentWords(payment: ShownPayment | null, currency: CurrencyCod
     p {
       margin-block-start: 8px;
       max-inline-size: 60ch;
+      text-wrap: pretty;
     }
   `,
   changeDetection: ChangeDetectionStrategy.OnPush,
