@@ -24,6 +24,7 @@ import { declineWords } from './payment-words';
     sw-card-picker,
     sw-error {
       inline-size: 100%;
+      max-inline-size: 640px;
     }
   `,
   changeDetection: ChangeDetectionStrategy.OnPush,

@@ -21,7 +21,7 @@ export interface OfferedDay {
 
     @media (max-width: 599.98px) {
       :host {
-        --sw-choice-least: 100px;
+        --sw-choice-least: 120px;
       }
     }
   `,
