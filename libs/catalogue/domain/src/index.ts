@@ -42,6 +42,7 @@ export {
   type VersionDifference,
 } from './difference/version-difference';
 export { lineWeights, type LineWeights } from './line-weights';
+export { primalName, speciesName } from './primal-name';
 export { resolveChoices, type ResolvedSpecification } from './resolve-choices';
 export { resolveOffer, type PieceWeights, type ResolvedOffer } from './resolve-offer';
 export {

@@ -9,6 +9,7 @@ import {
   weightText,
 } from '@seamwright/catalogue/ui';
 import { Card } from '@seamwright/shared/ui';
+import { UNIT_SPACE } from '@seamwright/shared/util';
 
 /** All numbers and words of a version as its author wrote them, with its method and choices. */
 @Component({
@@ -27,12 +28,12 @@ export class RecordNumbers {
     const facts: [label: string, text: string][] = [
       [$localize`:@@catalogue.record.lines:Cutting lines`, spec.cuttingLines],
       [$localize`:@@catalogue.record.bone:Bone`, boneStateName(spec.boneState)],
-      [$localize`:@@catalogue.record.fat:Fat cover, at most`, `${spec.fatCoverMm}\u2009mm`],
+      [$localize`:@@catalogue.record.fat:Fat cover, at most`, `${spec.fatCoverMm}${UNIT_SPACE}mm`],
       [$localize`:@@catalogue.record.removed:Taken off`, spec.removed.join(', ') || none],
       [$localize`:@@catalogue.record.finish:Finish`, finishName(spec.finish)],
       [
         $localize`:@@catalogue.record.size:Length × width × height`,
-        `${spec.lengthMm} × ${spec.widthMm} × ${spec.heightMm}\u2009mm ± ${spec.toleranceMm}`,
+        `${spec.lengthMm} × ${spec.widthMm} × ${spec.heightMm}${UNIT_SPACE}mm ± ${spec.toleranceMm}`,
       ],
       [
         $localize`:@@catalogue.record.weight:Weight of a piece`,
@@ -45,7 +46,7 @@ export class RecordNumbers {
       [$localize`:@@catalogue.record.tare:Tare of a pack`, weightText(spec.tareGrams)],
       [
         $localize`:@@catalogue.record.storage:Storage`,
-        `${temperatureName(spec.temperatureState)}, ${spec.storageMinC} – ${spec.storageMaxC}\u2009°C`,
+        `${temperatureName(spec.temperatureState)}, ${spec.storageMinC} – ${spec.storageMaxC}${UNIT_SPACE}°C`,
       ],
       [
         $localize`:@@catalogue.record.life:Life`,

@@ -9,6 +9,7 @@ import { SpecDrawing, weightText } from '@seamwright/catalogue/ui';
 import { selectRoles } from '@seamwright/identity/data-access/session';
 import { asProblem, failed, idle, loaded, loading, type Remote } from '@seamwright/shared/data-access';
 import { Card, Confirm, ErrorState, Loading, PageHead, Toast } from '@seamwright/shared/ui';
+import { UNIT_SPACE } from '@seamwright/shared/util';
 import { RecordNumbers } from './record-numbers';
 import { RecordOutputs } from './record-outputs';
 import { RecordVersions } from './record-versions';
@@ -66,7 +67,7 @@ export class SpecificationRecordPage {
     const grams = numbers && impliedGrams(numbers);
     if (numbers === null || grams === null) return null;
     const off = impliedDifferencePercent(numbers) ?? 0;
-    return { weight: weightText(grams), off: `${off > 0 ? '+' : off < 0 ? '−' : '±'}\u2009${Math.abs(off)}\u2009%` };
+    return { weight: weightText(grams), off: `${off > 0 ? '+' : off < 0 ? '−' : '±'}${Math.abs(off)}${UNIT_SPACE}%` };
   });
 
   constructor() {

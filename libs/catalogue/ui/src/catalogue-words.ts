@@ -4,17 +4,11 @@ import type {
   OutputKind,
   PackType,
   PieceKind,
-  Species,
   Station,
   TemperatureState,
   VersionStage,
 } from '@seamwright/catalogue/domain';
 
-const SPECIES: Readonly<Record<Species, string>> = {
-  lamb: $localize`:@@catalogue.species.lamb:Lamb`,
-  beef: $localize`:@@catalogue.species.beef:Beef`,
-  pork: $localize`:@@catalogue.species.pork:Pork`,
-};
 const BONES: Readonly<Record<BoneState, string>> = {
   'bone-in': $localize`:@@catalogue.bone.in:Bone-in`,
   boneless: $localize`:@@catalogue.bone.out:Boneless`,
@@ -82,7 +76,6 @@ const MANY: Readonly<Record<PieceKind, string>> = {
 };
 
 /** The words of the trade for what the domain keeps as codes. */
-export const speciesName = (species: Species): string => SPECIES[species];
 export const boneStateName = (boneState: BoneState): string => BONES[boneState];
 export const packTypeName = (packType: PackType): string => PACKS[packType];
 export const temperatureName = (state: TemperatureState): string => TEMPERATURES[state];

@@ -1,3 +1,4 @@
+export { speciesName } from '@seamwright/catalogue/domain';
 export { CarcaseChart, type ChartRegion } from './carcase/carcase-chart';
 export { regionName } from './carcase/region-names';
 export {
@@ -6,7 +7,6 @@ export {
   outputKindName,
   packTypeName,
   pieceName,
-  speciesName,
   stageName,
   stationName,
   temperatureName,

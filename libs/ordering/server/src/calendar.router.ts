@@ -18,7 +18,7 @@ import type { OrderingParts } from './ports';
 import { putSiteInZone, siteZonesOf } from './site-zones.repository';
 
 export function calendarImplementations(parts: OrderingParts): Implementation[] {
-  const { timeZone } = parts;
+  const { timeZone, days } = parts;
   return [
     implement(listDeliveryDays, ({ database, caller, now }, { query }) =>
       inTransaction(database, caller, (tx) => listDeliveryDaysOf(tx, { now, caller }, parts, query)),
@@ -38,10 +38,10 @@ export function calendarImplementations(parts: OrderingParts): Implementation[] 
       inTransaction(database, caller, (tx) => changeDeliveryZone(tx, params.zoneId, ifMatch, body)),
     ),
     implement(setClosure, ({ database, caller, now }, { params, body }) =>
-      inTransaction(database, caller, (tx) => closePlant(tx, { now, timeZone, day: params.day, reason: body.reason })),
+      inTransaction(database, caller, (tx) => closePlant(tx, { now, timeZone, days, ...params, ...body })),
     ),
-    implement(removeClosure, ({ database, caller }, { params }) =>
-      inTransaction(database, caller, (tx) => openPlant(tx, params.day)),
+    implement(removeClosure, ({ database, caller, now }, { params }) =>
+      inTransaction(database, caller, (tx) => openPlant(tx, { now, timeZone, days, ...params })),
     ),
     implement(listSiteZones, ({ database, caller }, { query }) =>
       inTransaction(database, caller, async (tx) => ({ items: await siteZonesOf(tx, query.customerId) })),

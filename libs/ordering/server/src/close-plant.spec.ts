@@ -33,6 +33,16 @@ const placing = (day: string) =>
 const closing = (day: string) =>
   house.call(house.admin, setClosure, { params: { day }, body: { reason: 'Stocktake' } });
 
+describe('closing the plant when the plant cuts on that day', () => {
+  it('is refused with what the plant says, and the day stays open', async () => {
+    const day = '2026-12-17';
+    house.cutDays.add(day);
+    expect((await closing(day)).problem).toMatchObject({ status: 409, code: 'day-being-cut' });
+    const { closures } = (await house.call(house.admin, getCalendar, {})).body;
+    expect(closures.map((closure) => closure.day)).not.toContain(day);
+  });
+});
+
 describe('closing the plant while orders are placed', () => {
   it('waits for an order that is being placed, and is refused since that stands', async () => {
     const day = '2026-12-08';
@@ -49,7 +59,7 @@ describe('closing the plant while orders are placed', () => {
     const day = '2026-12-09';
     let placed: ReturnType<typeof placing> | undefined;
     await inTransaction(house.database, house.admin, async (tx) => {
-      await closePlant(tx, { now: TEST_NOW, timeZone: house.parts.timeZone, day, reason: 'Stocktake' });
+      await closePlant(tx, { ...house.parts, now: TEST_NOW, day, reason: 'Stocktake' });
       placed = placing(day);
       await waitForLock(tx);
     });
@@ -58,7 +68,7 @@ describe('closing the plant while orders are placed', () => {
 
   it('does not keep an order for another day waiting', async () => {
     const placed = await inTransaction(house.database, house.admin, async (tx) => {
-      await closePlant(tx, { now: TEST_NOW, timeZone: house.parts.timeZone, day: '2026-12-10', reason: 'Stocktake' });
+      await closePlant(tx, { ...house.parts, now: TEST_NOW, day: '2026-12-10', reason: 'Stocktake' });
       return placing('2026-12-11');
     });
     expect(placed.status).toBe(201);

@@ -38,6 +38,8 @@ export interface DayPort {
   isClosed(tx: Tx, day: PlantDate): Promise<boolean>;
   /** Which of these days take no more orders. Only looks: nothing is locked, so it may have changed a moment later. */
   closedDays(tx: Tx, days: readonly PlantDate[]): Promise<ReadonlySet<PlantDate>>;
+  /** The plant was closed or opened for `day`, in this transaction. Refuses what would be cut then and can't be moved. */
+  calendarChanged(tx: Tx, day: PlantDate, today: PlantDate): Promise<void>;
 }
 
 /** What the composition root plugs in. */

@@ -1,5 +1,5 @@
 import type { PlantDate } from '@seamwright/shared/util';
-import { CUTTING_DAY_STATES, cuttingDayOf, cuttingDayStates, isClosedToOrders } from './index';
+import { CUTTING_DAY_STATES, cuttingDayAfterChange, cuttingDayOf, cuttingDayStates, isClosedToOrders } from './index';
 
 const day = (text: string) => text as PlantDate;
 const closed = (...days: string[]) => new Set(days.map(day));
@@ -37,5 +37,40 @@ describe('the day of cutting', () => {
       new Date(Date.UTC(2026, 11, 4 - back)).toISOString().slice(0, 10),
     );
     expect(() => cuttingDayOf(day('2026-12-04'), closed(...long))).toThrow(RangeError);
+  });
+});
+
+describe('a cutting day when the calendar changes', () => {
+  const friday = { deliveryDay: day('2026-12-04'), cuttingDay: day('2026-12-03') };
+  const today = day('2026-12-01');
+
+  it('moves to the working day before while it is open, and back again', () => {
+    const open = { ...friday, state: 'open' as const };
+    expect(cuttingDayAfterChange(open, closed('2026-12-03'), today)).toEqual({ ok: true, value: '2026-12-02' });
+    const moved = { ...open, cuttingDay: day('2026-12-02') };
+    expect(cuttingDayAfterChange(moved, closed(), today)).toEqual({ ok: true, value: '2026-12-03' });
+  });
+
+  it('refuses to close a day on which a fixed list is cut', () => {
+    for (const state of ['closed', 'planned', 'released'] as const) {
+      expect(cuttingDayAfterChange({ ...friday, state }, closed('2026-12-03'), today)).toMatchObject({
+        refusal: { code: 'day-being-cut', params: { delivery: '2026-12-04' } },
+      });
+      expect(cuttingDayAfterChange({ ...friday, state }, closed('2026-12-02'), today)).toMatchObject({ ok: true });
+    }
+  });
+
+  it('leaves a day alone that is over', () => {
+    expect(cuttingDayAfterChange({ ...friday, state: 'finished' }, closed('2026-12-03'), today)).toEqual({
+      ok: true,
+      value: '2026-12-03',
+    });
+  });
+
+  it('refuses when no day to cut is left before the delivery', () => {
+    const open = { ...friday, state: 'open' as const };
+    expect(cuttingDayAfterChange(open, closed('2026-12-03'), day('2026-12-03'))).toMatchObject({
+      refusal: { code: 'no-day-to-cut' },
+    });
   });
 });

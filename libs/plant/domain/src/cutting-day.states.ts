@@ -16,3 +16,7 @@ export const cuttingDayStates = stateTable<CuttingDayState, CuttingDayMove>({
 
 /** Whether orders for the day are no longer taken. */
 export const isClosedToOrders = (state: CuttingDayState): boolean => state !== 'open';
+
+/** Whether the list is fixed and its cutting is not over yet. */
+export const isBeingCut = (state: CuttingDayState): boolean =>
+  state === 'closed' || state === 'planned' || state === 'released';

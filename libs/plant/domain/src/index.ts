@@ -1,12 +1,13 @@
 export {
   CUTTING_DAY_STATES,
   cuttingDayStates,
+  isBeingCut,
   isClosedToOrders,
   type CuttingDayMove,
   type CuttingDayState,
 } from './cutting-day.states';
 export { CAUTIONS, cautionsOf, type Caution } from './cautions';
-export { cuttingDayOf, type CuttingDay } from './cutting-day';
+export { cuttingDayAfterChange, cuttingDayOf, type CuttingDay } from './cutting-day';
 export { type Cut, type CutFor, type CuttingLine, type Primal } from './cutting-line';
 export type { CutQuantity } from './cut-quantity';
 export {

@@ -1,11 +1,11 @@
 import { NgTemplateOutlet } from '@angular/common';
 import { ChangeDetectionStrategy, Component, computed, inject, input, LOCALE_ID } from '@angular/core';
-import { speciesName } from '@seamwright/catalogue/ui';
+import { primalName, speciesName } from '@seamwright/catalogue/domain';
 import type { CuttingListWire } from '@seamwright/plant/contracts';
 import { minutesOf } from '@seamwright/plant/domain';
 import { formatKg, grams } from '@seamwright/shared/util';
 import { cuttingGroups } from './cutting-groups';
-import { casesWords, primalName } from './day-words';
+import { casesWords } from './day-words';
 
 /** What is cut, by species and primal, with the sums of each. */
 @Component({

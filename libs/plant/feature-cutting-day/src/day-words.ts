@@ -1,5 +1,4 @@
-import { speciesName } from '@seamwright/catalogue/ui';
-import { cuttingDayStateName, type CuttingDayWire, type PullListWire } from '@seamwright/plant/contracts';
+import { cuttingDayStateName, type CuttingDayWire } from '@seamwright/plant/contracts';
 import type { DayDeed } from '@seamwright/plant/data-access';
 import { CUTTING_DAY_STATES } from '@seamwright/plant/domain';
 import type { ChipTone, ConfirmQuestion, SeamStage } from '@seamwright/shared/ui';
@@ -91,10 +90,6 @@ export function deedQuestion(deed: DayDeed, { orders, waitingOrders }: CuttingDa
       };
   }
 }
-
-/** "Lamb leg": more than one species has a leg, a loin, and a shoulder. */
-export const primalName = ({ name, species }: PullListWire['rows'][number]['primal']): string =>
-  $localize`:@@plant.primal:${speciesName(species)}:species: ${name.charAt(0).toLowerCase() + name.slice(1)}:primal:`;
 
 /** "2 cases + 5", "1 case", "5 loose". */
 export function casesWords({ cases, loosePieces }: { readonly cases: number; readonly loosePieces: number }): string {

@@ -1,9 +1,9 @@
 import { ChangeDetectionStrategy, Component, computed, inject, input, LOCALE_ID } from '@angular/core';
+import { primalName } from '@seamwright/catalogue/domain';
 import type { CuttingListWire, PullListWire } from '@seamwright/plant/contracts';
 import { Card, Chip, DatePipe, KgPipe, Why, type WhyPart } from '@seamwright/shared/ui';
 import { DataTable, TableCell, type TableColumn } from '@seamwright/shared/ui/table';
 import { formatKgWithUnit, grams } from '@seamwright/shared/util';
-import { primalName } from './day-words';
 
 type Row = PullListWire['rows'][number];
 

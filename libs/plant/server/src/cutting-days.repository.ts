@@ -1,6 +1,6 @@
 import { sql } from 'kysely';
 import { notFound, type Tx } from '@seamwright/shared/server';
-import { newId, type PlantDate } from '@seamwright/shared/util';
+import { addDays, newId, type PlantDate } from '@seamwright/shared/util';
 import { closuresFor } from '@seamwright/ordering/server';
 import { cuttingDayOf, isClosedToOrders, type CuttingDay, type CuttingDayState } from '@seamwright/plant/domain';
 
@@ -108,6 +108,38 @@ export async function saveDay(
   await tx
     .updateTable('cuttingDays')
     .set({ ...moved, rowVersion: rowVersion + 1 })
+    .where('id', '=', id)
+    .execute();
+}
+
+/** How far after its cutting a delivery can lie. */
+const FARTHEST_AHEAD = 60;
+
+/** The days that may be cut on `day`, locked, with how many orders stand for each. */
+export async function daysAround(tx: Tx, day: PlantDate): Promise<(CuttingDay & { readonly orders: number })[]> {
+  const rows = await tx
+    .selectFrom('cuttingDays as d')
+    .select(COLUMNS)
+    .select(({ selectFrom }) =>
+      selectFrom('orders as o')
+        .whereRef('o.deliveryDay', '=', 'd.deliveryDay')
+        .where('o.cancelledAt', 'is', null)
+        .select(sql<number>`count(*)`.as('orders'))
+        .as('orders'),
+    )
+    .where('d.deliveryDay', '>', day)
+    .where('d.deliveryDay', '<=', addDays(day, FARTHEST_AHEAD))
+    .orderBy('d.deliveryDay')
+    .forUpdate()
+    .execute();
+  return rows.map((row) => dayOf({ ...row, orders: row.orders ?? 0 }));
+}
+
+/** Writes a locked day's new day of cutting. */
+export async function moveCuttingDay(tx: Tx, { id, rowVersion }: CuttingDay, cuttingDay: PlantDate): Promise<void> {
+  await tx
+    .updateTable('cuttingDays')
+    .set({ cuttingDay, rowVersion: rowVersion + 1 })
     .where('id', '=', id)
     .execute();
 }

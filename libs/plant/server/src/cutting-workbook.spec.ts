@@ -1,4 +1,5 @@
 import { Workbook, type CellValue, type Worksheet } from 'exceljs';
+import { primalName } from '@seamwright/catalogue/domain';
 import { getCuttingList, getPullList, getWorkbook } from '@seamwright/plant/contracts';
 import { DELIVERY_DAY, openTestPlant, type TestPlant } from '../testing/src/index';
 import { inTransaction, system } from '@seamwright/shared/server';
@@ -68,8 +69,8 @@ it('has a row for each row of the screen, with its numbers', async () => {
   const rows = rowsOf('Cutting list');
   for (const { primal, rows: cuts, totals } of cutting.primals) {
     for (const { cut, pieces, outGrams } of cuts)
-      expect(rows).toContainEqual(expect.arrayContaining([primal.name, cut.code, cut.name, pieces, outGrams / 1000]));
-    expect(rows.find(([first]) => first === `${primal.name} in all`)?.[7]).toBe(totals.outGrams / 1000);
+      expect(rows).toContainEqual(expect.arrayContaining([primalName(primal.species, primal.name), cut.code, cut.name, pieces, outGrams / 1000]));
+    expect(rows.find(([first]) => first === `${primalName(primal.species, primal.name)} in all`)?.[7]).toBe(totals.outGrams / 1000);
   }
   expect(rows.flat().some((cell) => typeof cell === 'object' && cell !== null && 'formula' in cell)).toBe(false);
 });
@@ -79,7 +80,7 @@ it('names lots with their use-by as dates, and what is short', () => {
   const first = rows.find(([, lot]) => lot === 'B-1');
   expect(first?.[2]).toEqual(new Date('2026-12-05T00:00:00Z'));
   // 179 × 280 g over 0.784 is 63,929 g; the two lots hold 72,000 g, of which eleven pieces are enough.
-  expect(rows.find(([name]) => name === 'Striploin in all')?.slice(3)).toEqual([11, 66, 63.929, 50.12, 2.071, 0]);
+  expect(rows.find(([name]) => name === 'Beef striploin in all')?.slice(3)).toEqual([11, 66, 63.929, 50.12, 2.071, 0]);
 });
 
 it('has real number formats', () => {

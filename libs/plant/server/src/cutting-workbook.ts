@@ -1,4 +1,5 @@
 import { Workbook } from 'exceljs';
+import { primalName } from '@seamwright/catalogue/domain';
 import { cautionScope, cautionWords, type CuttingListWire, type PullListWire } from '@seamwright/plant/contracts';
 import { minutesOf } from '@seamwright/plant/domain';
 import { formatPlantDate } from '@seamwright/shared/util';
@@ -8,6 +9,7 @@ import { addSheet, type SheetColumn, type SheetContent, type SheetRow } from './
 const text = (head: string, width: number): SheetColumn => ({ head, kind: 'text', width });
 const kg = (head: string): SheetColumn => ({ head, kind: 'kg', width: 14 });
 const count = (head: string): SheetColumn => ({ head, kind: 'count', width: 10 });
+const nameOf = ({ species, name }: PullListWire['rows'][number]['primal']): string => primalName(species, name);
 const total = $localize`:@@plant.workbook.total:Total`;
 
 /** The day's papers as one workbook. Every total is a number, the same that the screen shows. */
@@ -47,11 +49,11 @@ function cuttingSheet({ primals, totals }: CuttingListWire): Omit<SheetContent, 
     rows: [
       ...primals.flatMap(({ primal, rows, totals: ofPrimal }): SheetRow[] => [
         ...rows.map(({ cut, ...row }) => ({
-          cells: [primal.name, cut.code, cut.name, cut.summary, ...numbers(row)],
+          cells: [nameOf(primal), cut.code, cut.name, cut.summary, ...numbers(row)],
         })),
         {
           cells: [
-            $localize`:@@plant.workbook.primalTotal:${primal.name}:primal: in all`,
+            $localize`:@@plant.workbook.primalTotal:${nameOf(primal)}:primal: in all`,
             null,
             null,
             null,
@@ -119,10 +121,10 @@ function pullSheet({ rows, totals }: PullListWire): Omit<SheetContent, 'title'> 
     ],
     rows: [
       ...rows.flatMap(({ primal, pulls, ...row }): SheetRow[] => [
-        ...pulls.map((pull) => ({ cells: [primal.name, pull.lotCode, pull.useBy, pull.pieces, pull.pulledGrams] })),
+        ...pulls.map((pull) => ({ cells: [nameOf(primal), pull.lotCode, pull.useBy, pull.pieces, pull.pulledGrams] })),
         {
           cells: [
-            $localize`:@@plant.workbook.primalTotal:${primal.name}:primal: in all`,
+            $localize`:@@plant.workbook.primalTotal:${nameOf(primal)}:primal: in all`,
             null,
             null,
             row.pieces,

@@ -1,3 +1,4 @@
+import { primalName } from '@seamwright/catalogue/domain';
 import type { OrderWithLines } from '@seamwright/ordering/domain';
 import { lockOrder, markPacked, markShort, orderById } from '@seamwright/ordering/server';
 import { roomForPack } from '@seamwright/plant/domain';
@@ -52,7 +53,7 @@ export async function weighPack(tx: Tx, { now, caller, orderId }: AtTheScale, we
   if (lot.nodeId !== cut.cut.primal.id)
     throw new RefusalError({
       code: 'lot-of-another-primal',
-      params: { lot: lot.code, primal: cut.cut.primal.name },
+      params: { lot: lot.code, primal: primalName(cut.cut.primal.species, cut.cut.primal.name) },
       pointer: '/lotId',
     });
   unwrap(lotFit(lot, { deliveryDay: order.deliveryDay, cuttingDay: order.deliveryDay }));

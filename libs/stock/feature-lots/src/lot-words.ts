@@ -1,7 +1,5 @@
-import { speciesName } from '@seamwright/catalogue/ui';
 import type { LotState } from '@seamwright/stock/domain';
 import type { LotWire } from '@seamwright/stock/contracts';
-import type { LotPrimal } from '@seamwright/stock/data-access';
 import type { ChipTone, SeamStage } from '@seamwright/shared/ui';
 
 export const lotStateName = (state: LotState): string =>
@@ -15,10 +13,6 @@ export const lotStateName = (state: LotState): string =>
 
 export const lotTone = (state: LotState): ChipTone =>
   (({ received: 'info', 'on-hold': 'eye', released: 'ok', 'used-up': 'plain', recalled: 'bad' }) as const)[state];
-
-/** "Lamb leg": more than one species has a leg, a loin, and a shoulder. */
-export const primalWords = ({ name, species }: LotPrimal): string =>
-  $localize`:@@lots.primalWords:${speciesName(species)}:species: ${name.charAt(0).toLowerCase() + name.slice(1)}:primal:`;
 
 /** The lot's way from the door to its last piece. A hold or a recall stands in the place of the release. */
 export function lotStages({ state }: Pick<LotWire, 'state'>): SeamStage[] {

@@ -1,9 +1,9 @@
 import { inject } from '@angular/core';
 import { toSignal } from '@angular/core/rxjs-interop';
 import { catchError, map, of } from 'rxjs';
+import { primalName } from '@seamwright/catalogue/domain';
 import type { LotWire } from '@seamwright/stock/contracts';
 import { LotReceipts } from '@seamwright/stock/data-access';
-import { primalWords } from './lot-words';
 
 const NONE: ReadonlyMap<string, string> = new Map();
 
@@ -13,7 +13,7 @@ export function primalNames(): (lot: LotWire) => string {
     inject(LotReceipts)
       .primals()
       .pipe(
-        map(({ items }): ReadonlyMap<string, string> => new Map(items.map((each) => [each.id, primalWords(each)]))),
+        map(({ items }): ReadonlyMap<string, string> => new Map(items.map(({ id, species, name }) => [id, primalName(species, name)]))),
         catchError(() => of(NONE)),
       ),
     { initialValue: NONE },

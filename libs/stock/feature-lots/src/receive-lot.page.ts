@@ -14,13 +14,13 @@ import { MatInputModule } from '@angular/material/input';
 import { MatSelectModule } from '@angular/material/select';
 import { ActivatedRoute, Router } from '@angular/router';
 import { catchError, map, of } from 'rxjs';
+import { primalName } from '@seamwright/catalogue/domain';
 import { LotReceipts, type LotReceipt } from '@seamwright/stock/data-access';
 import { sayRefusal, type Problem } from '@seamwright/shared/contracts';
 import { asProblem } from '@seamwright/shared/data-access';
 import { Card, ErrorState, PageHead, Toast } from '@seamwright/shared/ui';
 import { FieldError, FormErrors, showServerErrors } from '@seamwright/shared/ui/forms';
 import { newId, parseKg, unwrap } from '@seamwright/shared/util';
-import { primalWords } from './lot-words';
 
 /** The domain's own reading of a weight, as a validator. */
 function readableKg({ value }: AbstractControl<string>): ValidationErrors | null {
@@ -66,7 +66,7 @@ export class ReceiveLotPage {
     ),
     { initialValue: { items: [], problem: null } },
   );
-  protected readonly primalWords = primalWords;
+  protected readonly primalName = primalName;
   protected readonly sending = signal(false);
   protected readonly problem = signal<Problem | null>(null);
   protected readonly homeless = signal<Problem['errors']>([]);

@@ -1,5 +1,4 @@
-import type { Species } from '@seamwright/catalogue/domain';
-import { speciesName } from '@seamwright/catalogue/ui';
+import { primalName, type Species } from '@seamwright/catalogue/domain';
 import type { LotWire } from '@seamwright/stock/contracts';
 import { formatKg, grams, type PlantDate } from '@seamwright/shared/util';
 import { daysAhead, inWords } from './plant-day';
@@ -19,7 +18,7 @@ const lotTask = (lot: LotWire, primals: Primals, locale: string): Omit<Task, 'no
     id: lot.id,
     figure: formatKg(grams(lot.remainingGrams), locale),
     unit: $localize`:@@admin.home.kg:kg`,
-    text: species ? `${speciesName(species)} ${lot.nodeName.toLocaleLowerCase(locale)}` : lot.nodeName,
+    text: species ? primalName(species, lot.nodeName) : lot.nodeName,
     link: ['/lots', lot.id],
   };
 };

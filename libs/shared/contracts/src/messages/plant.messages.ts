@@ -10,4 +10,8 @@ export const plantMessages = {
     $localize`Line ${p['line']}:line: only waits for ${p['open']}:open: more pieces, not ${p['pieces']}:pieces:.`,
   'lot-of-another-primal': (p) =>
     $localize`Lot ${p['lot']}:lot: is not ${p['primal']}:primal:, from which this is cut. Take a lot of it.`,
+  'day-being-cut': (p) =>
+    $localize`The orders for ${p['delivery']}:delivery: are closed and are cut on ${p['day']}:day:. Finish that cutting day first, or close the plant on another day.`,
+  'no-day-to-cut': (p) =>
+    $localize`Orders stand for ${p['delivery']}:delivery:, and no day is left to cut them when the plant is closed on ${p['day']}:day:. Move or cancel them first.`,
 } satisfies MessageTable;
