@@ -38,7 +38,7 @@ export const PLACES = {
   cuttingDays: {
     path: 'cutting-days',
     label: $localize`:@@admin.nav.cuttingDays:Cutting days`,
-    about: $localize`:@@admin.about.cuttingDays:Close a day, cutting list, pull list, workbook`,
+    about: $localize`:@@admin.about.cuttingDays:What is cut for each day: cutting list, pull list, workbook`,
     roles: ['planner', 'technical', 'floor', 'admin'],
   },
   scale: {

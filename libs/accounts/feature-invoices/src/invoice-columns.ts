@@ -28,7 +28,7 @@ const rest: Columns = [
     label: $localize`:@@invoices.column.open:Left to pay`,
     kind: 'money',
     sortable: true,
-    value: ({ totalMinor, paidMinor }) => totalMinor - paidMinor,
+    value: ({ totalMinor, paidMinor }) => totalMinor - paidMinor || null,
   },
 ];
 

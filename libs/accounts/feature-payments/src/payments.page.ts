@@ -107,7 +107,7 @@ export class PaymentsPage {
       kind: 'code',
       value: ({ createdAt }) => instantWords(createdAt, this.locale),
     },
-    { key: 'more', label: $localize`:@@payments.column.more:More`, kind: 'template' },
+    { key: 'more', label: $localize`:@@payments.column.more:More`, kind: 'template', align: 'end' },
   ];
   protected readonly idOf = ({ id }: PaymentWire): string => id;
 

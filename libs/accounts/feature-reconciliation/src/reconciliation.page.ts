@@ -27,7 +27,7 @@ import {
 import { MoneySeam } from '@seamwright/accounts/ui/money-seam';
 import { HOUSE_CURRENCY } from '@seamwright/pricing/domain';
 import { Card, ErrorState, Icon, Loading, PageHead, Stale, Toast } from '@seamwright/shared/ui';
-import { addDays, formatPlantDate, isPlantDate, plantToday } from '@seamwright/shared/util';
+import { addDays, isPlantDate, plantToday } from '@seamwright/shared/util';
 import { ClearingCheck } from './clearing-check';
 import { exceptionRows } from './exception-rows';
 import { flowOfWeek } from './flow-of-week';
@@ -71,6 +71,7 @@ export class ReconciliationPage {
   private readonly router = inject(Router);
   private readonly toast = inject(Toast);
   private readonly locale = inject(LOCALE_ID);
+  private readonly mondays = new Intl.DateTimeFormat(this.locale, { dateStyle: 'long', timeZone: 'UTC' });
   private readonly importing = viewChild<unknown, ElementRef<HTMLElement>>('importing', { read: ElementRef });
 
   protected readonly wanted = computed(() => {
@@ -117,7 +118,8 @@ export class ReconciliationPage {
   }
 
   protected headingOf({ from }: ReconciliationWire): string {
-    const day = isPlantDate(from) ? formatPlantDate(from, 'long', this.locale) : from;
+    // Every week begins on a Monday, so that need not be said.
+    const day = isPlantDate(from) ? this.mondays.format(new Date(`${from}T00:00:00Z`)) : from;
     return $localize`:@@reconciliation.heading:Week of ${day}:monday:`;
   }
 

@@ -46,6 +46,6 @@ export class WeekExceptions {
       sortable: true,
     },
     { key: 'cause', label: $localize`:@@reconciliation.column.cause:Likely cause`, kind: 'text' },
-    { key: 'act', label: $localize`:@@reconciliation.column.act:What to do`, kind: 'template' },
+    { key: 'act', label: $localize`:@@reconciliation.column.act:What to do`, kind: 'template', align: 'end' },
   ];
 }

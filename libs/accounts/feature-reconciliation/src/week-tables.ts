@@ -39,6 +39,13 @@ interface Moved {
       display: grid;
       grid-template-columns: minmax(0, 1fr);
       gap: 24px;
+      margin-inline: -24px;
+    }
+
+    @media (max-width: 599.98px) {
+      :host {
+        margin-inline: -16px;
+      }
     }
   `,
   changeDetection: ChangeDetectionStrategy.OnPush,

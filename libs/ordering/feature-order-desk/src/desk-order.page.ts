@@ -94,10 +94,11 @@ export class DeskOrderPage {
     return $localize`:@@deskOrder.heading:Order ${number}:number: of ${customer.name}:customer:`;
   }
 
-  protected subOf({ deliveryDay, site, source, placedBy }: OrderDetail): string {
+  protected subOf({ customer, deliveryDay, site, source, placedBy }: OrderDetail): string {
     const day = isPlantDate(deliveryDay) ? formatPlantDate(deliveryDay, 'long', this.locale) : deliveryDay;
     const by = placedBy === null ? sourceWord(source) : `${sourceWord(source)}, ${placedBy}`;
-    return `${day} · ${site.name} · ${by}`;
+    // A customer with one site often has its name.
+    return [day, ...(site.name === customer.name ? [] : [site.name]), by].join(' · ');
   }
 
   protected cancel({ id, rowVersion }: OrderDetail): void {

@@ -55,7 +55,7 @@ export class PriceListsPage {
   protected readonly loading = computed(() => this.lists().status === 'loading');
   protected readonly search = new FormGroup({
     q: new FormControl('', { nonNullable: true }),
-    level: new FormControl<PriceLevel | null>(null),
+    level: new FormControl<PriceLevel | ''>('', { nonNullable: true }),
   });
 
   protected readonly levels = PRICE_LEVELS;
@@ -87,7 +87,7 @@ export class PriceListsPage {
 
   protected load(): void {
     const { q, level } = this.search.getRawValue();
-    this.store.dispatch(PriceListsPageActions.searched({ search: { q: q.trim(), level } }));
+    this.store.dispatch(PriceListsPageActions.searched({ search: { q: q.trim(), level: level || null } }));
   }
 
   protected more(): void {

@@ -23,6 +23,8 @@ export class HomeBoard {
   readonly all = input.required<readonly string[]>();
   readonly query = input<Readonly<Record<string, string>>>({});
   readonly allLabel = input.required<string>();
+  /** Whether the tasks are counted at the head; not where each is a count itself. */
+  readonly counted = input(true);
   readonly retry = output();
 
   protected readonly shown = computed(() => this.tasks()?.slice(0, MOST_TASKS) ?? []);

@@ -1,10 +1,11 @@
 import type { Type } from '@angular/core';
 import type { Role } from '@seamwright/shared/contracts';
-import { AccountsHome } from './accounts-home';
+import { AccountsBoard } from './accounts.board';
 import { ClosuresBoard } from './closures.board';
 import { CuttingDaysBoard } from './cutting-days.board';
 import { ExpiringLotsBoard } from './expiring-lots.board';
 import { InvitedBoard } from './invited.board';
+import { OverdueInvoicesBoard } from './overdue-invoices.board';
 import { PackingBoard } from './packing.board';
 import { QuotesBoard } from './quotes.board';
 import { UndecidedLotsBoard } from './undecided-lots.board';
@@ -25,7 +26,8 @@ const BOARDS: readonly Board[] = [
   { board: ExpiringLotsBoard, roles: ['planner'] },
   { board: VersionsBoard, roles: ['technical'] },
   { board: UndecidedLotsBoard, roles: ['technical'] },
-  { board: AccountsHome, roles: ['accounts'] },
+  { board: AccountsBoard, roles: ['accounts'] },
+  { board: OverdueInvoicesBoard, roles: ['accounts'] },
   { board: InvitedBoard, roles: ['admin'] },
   { board: ClosuresBoard, roles: ['admin'] },
 ];

@@ -10,6 +10,8 @@ export interface Task {
   readonly text: string;
   readonly note?: string;
   readonly link: readonly string[];
+  /** What is shown there, of all that there is. */
+  readonly query?: Readonly<Record<string, string>>;
   /** How it stands, in a word. */
   readonly mark?: { readonly tone: ChipTone; readonly word: string };
 }

@@ -1,9 +1,11 @@
+import type { InvoiceListItem } from '@seamwright/accounts/contracts';
 import type { SpecificationRow } from '@seamwright/catalogue/contracts';
 import type { PersonView } from '@seamwright/identity/contracts';
 import { aDay, aPackingLine, aPackingOrder } from '@seamwright/plant/data-access/testing';
 import type { QuoteListItem } from '@seamwright/pricing/contracts';
 import { aLotWire } from '@seamwright/stock/data-access/testing';
 import { minorUnits, type PlantDate } from '@seamwright/shared/util';
+import { accountsTasks, overdueTasks } from './accounts.tasks';
 import { cuttingDayTasks, lastCutOff, type Vans } from './cutting-days.tasks';
 import { expiringTasks, undecidedTasks } from './lots.tasks';
 import { packingTasks } from './orders.tasks';
@@ -181,4 +183,53 @@ describe('what administrators and the technical look after', () => {
     expect(tasks.map(({ figure, link }) => [figure, link])).toEqual([['BF-901', ['/specifications', 'BF-901']]]);
     expect(marks(tasks)).toEqual(['Version 2']);
   });
+});
+
+describe('money today', () => {
+  const work = (openExceptions: number, overdue: number, more = false) =>
+    accountsTasks({
+      openExceptions,
+      overdueInvoices: { count: overdue, more },
+      holdsEndingSoon: { count: 0, more: false },
+    });
+
+  it('is three counts, each leading to what it counts', () => {
+    const tasks = work(2, 9);
+    expect(tasks.map(({ figure }) => figure)).toEqual(['2', '9', '0']);
+    expect(tasks.map(({ link, query }) => [link[0], query])).toEqual([
+      ['/reconciliation', undefined],
+      ['/invoices', { standing: 'overdue' }],
+      ['/payments', { state: 'pre-authorised' }],
+    ]);
+    expect(marks(tasks)).toEqual(['Look into it', 'Remind', 'None']);
+  });
+
+  it('says when all is well, and when there are more than were counted', () => {
+    expect(marks(work(0, 0))).toEqual(['Every penny is explained', 'None', 'None']);
+    expect(work(0, 200, true)[1]?.figure).toBe('200+');
+  });
+});
+
+it('overdue invoices come the longest overdue first, with what is left to pay', () => {
+  const invoice = (number: number, dueOn: string, paidMinor = 0): InvoiceListItem => ({
+    id: String(number),
+    number,
+    order: { id: 'o', number: 1_042 },
+    customer: { id: 'c', name: 'Test pub' },
+    deliveryDay: '2026-11-20',
+    issuedOn: '2026-11-20',
+    dueOn,
+    currency: 'GBP',
+    netMinor: 23_780,
+    taxMinor: 0,
+    totalMinor: 23_780,
+    paidMinor,
+    standing: 'overdue',
+  });
+  const tasks = overdueTasks([invoice(2_042, '2026-11-30'), invoice(2_013, '2026-11-22', 3_780)], TODAY, 'en-GB');
+  expect(tasks.map(({ figure, note }) => [figure, note])).toEqual([
+    ['£200.00', 'Invoice 2013 · due Sun 22 Nov'],
+    ['£237.80', 'Invoice 2042 · due Mon 30 Nov'],
+  ]);
+  expect(marks(tasks)).toEqual(['9 days over', '1 day over']);
 });

@@ -56,7 +56,11 @@ export async function openAccountsHouse(processor: Processor): Promise<AccountsH
   };
   const cards = cardPort(parts);
   const subscribers = [...orderingSubscribers({ cards }), ...accountsSubscribers(parts)];
-  const days = { isClosed: async () => false, closedDays: async () => new Set<never>() };
+  const days = {
+    isClosed: async () => false,
+    closedDays: async () => new Set<never>(),
+    calendarChanged: async () => undefined,
+  };
   const house = await openTestHouse({
     implementations: ({ clock }) => [
       ...orderingImplementations({ timeZone: parts.timeZone, cards, days, clock }),

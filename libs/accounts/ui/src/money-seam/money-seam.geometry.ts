@@ -71,7 +71,8 @@ export function moneySeam(flow: MoneyFlow, width: number): SeamPicture {
 
 function drawAcross(flow: MoneyFlow, width: number, most: number): SeamPicture {
   const [source, bank] = [132, width - 140];
-  const middle = source + Math.round((bank - source) * 0.46);
+  // Without a payout the flow ends at the processor, and has the whole width to get there.
+  const middle = flow.paidOutMinor > 0 ? source + Math.round((bank - source) * 0.46) : bank;
   const onTheWay = (share: number) => source + Math.round((middle - source) * share);
   const after = (share: number) => middle + Math.round((bank - middle) * share);
   const ends = {
@@ -142,6 +143,7 @@ function drawDown(flow: MoneyFlow, width: number, most: number): SeamPicture {
   if (flow.bankLessMinor > 0) ends['bank-less'] = next('bank-less');
   if (flow.bankMoreMinor > 0) ends['bank-more'] = next('bank-more');
   if (flow.onItsWayMinor > 0) next('on-its-way');
+  const inBank = flow.paidOutMinor > 0 || flow.inBankMinor > 0;
   const bank = next('bank');
   const drawn = draw(flow, { source, ends, bank, top: 0, across, gap: 14 }, most);
   const column = Math.ceil(Math.max(across, ...drawn.posts.map(({ v, size }) => v + size)) + 22);
@@ -154,7 +156,7 @@ function drawDown(flow: MoneyFlow, width: number, most: number): SeamPicture {
     ...goesOut(flow).flatMap(({ key, minor }) => at(key, `out ${key}`, minor)),
     ...(['cards-differ', 'bank-less', 'bank-more'] as const).flatMap((key) => at(key, key, minorOfBreak(flow, key))),
     ...at('on-its-way', 'on-its-way', flow.onItsWayMinor),
-    ...at('bank', 'bank', flow.inBankMinor),
+    ...(inBank ? at('bank', 'bank', flow.inBankMinor) : []),
   ];
   return picture(drawn, width, labels, 'down');
 }
@@ -198,7 +200,7 @@ function draw(flow: MoneyFlow, { source, ends, bank, top, across, gap }: Places,
   if (middle !== undefined)
     for (const { key, minor } of fromPaidOut(flow)) {
       const from = { u: middle + POST, v };
-      const to = { u: ends[key] ?? bank, v: key === 'on-its-way' ? v + gap : v };
+      const to = { u: ends[key] ?? bank, v: key === 'on-its-way' && v > top ? v + gap : v };
       ribbons.push({ key, from, to, size: size(minor) });
       if (key === 'bank-less') breaks.push({ key, u: to.u, v: v + size(minor) / 2 });
       else posts.push({ key, side: 'out', ...to, size: size(minor) });

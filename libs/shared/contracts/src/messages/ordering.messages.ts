@@ -1,4 +1,5 @@
 import { formatKgWithUnit, formatMoney, grams, minorUnits } from '@seamwright/shared/util';
+import { day } from './day-text';
 import type { MessageTable } from './message-table';
 
 const money = (minor: string | number | undefined): string => formatMoney(minorUnits(Number(minor ?? 0)), 'GBP');
@@ -11,15 +12,16 @@ export const orderingMessages = {
   'site-without-zone': (p) =>
     $localize`${p['site']}:site: is not in a delivery zone yet. Ask the desk to put it into one.`,
   'zone-unknown': () => $localize`There is no such delivery zone.`,
-  'day-past': (p) => $localize`${p['day']}:day: is past. Choose a later day.`,
-  'day-too-far': (p) => $localize`${p['day']}:day: is more than ${p['most']}:days: days ahead. Choose a nearer day.`,
-  'plant-closed': (p) => $localize`The plant is closed on ${p['day']}:day:. Choose another day.`,
+  'day-past': (p) => $localize`${day(p['day'])}:day: is past. Choose a later day.`,
+  'day-too-far': (p) =>
+    $localize`${day(p['day'])}:day: is more than ${p['most']}:days: days ahead. Choose a nearer day.`,
+  'plant-closed': (p) => $localize`The plant is closed on ${day(p['day'])}:day:. Choose another day.`,
   'no-delivery-that-day': (p) =>
-    $localize`There is no delivery in ${p['zone']}:zone: on ${p['day']}:day:. Choose one of the days offered.`,
-  'cut-off-passed': (p) => $localize`The cut-off for ${p['day']}:day: has passed. Choose a later day.`,
+    $localize`There is no delivery in ${p['zone']}:zone: on ${day(p['day'])}:day:. Choose one of the days offered.`,
+  'cut-off-passed': (p) => $localize`The cut-off for ${day(p['day'])}:day: has passed. Choose a later day.`,
   'lead-days-short': (p) =>
-    $localize`What is chosen needs ${p['days']}:days: more working days than are left before ${p['day']}:day:. Choose a later day, or choose differently.`,
-  'day-closed': (p) => $localize`The list for ${p['day']}:day: is closed. Choose a later day.`,
+    $localize`What is chosen needs ${p['days']}:days: more working days than are left before ${day(p['day'])}:day:. Choose a later day, or choose differently.`,
+  'day-closed': (p) => $localize`The list for ${day(p['day'])}:day: is closed. Choose a later day.`,
   'line-too-heavy': (p) =>
     $localize`That comes to ${formatKgWithUnit(grams(Number(p['grams'])))}:weight:; one line can be at most ${formatKgWithUnit(grams(Number(p['most'])))}:most:. Check the quantity, or ring the desk.`,
   'quantity-not-whole': () => $localize`Order whole pieces, cases or grams.`,
@@ -31,7 +33,7 @@ export const orderingMessages = {
   'card-still-asked': () =>
     $localize`The bank has not settled the last card yet. Wait a moment, then try another one if it is declined.`,
   'too-late-to-confirm': (p) =>
-    $localize`The list for ${p['day']}:day: is closed, so order ${p['number']}:number: can't be confirmed any more. Ring the desk.`,
+    $localize`The list for ${day(p['day'])}:day: is closed, so order ${p['number']}:number: can't be confirmed any more. Ring the desk.`,
   'price-moved': (p) =>
     $localize`Prices have changed: this can now come to ${money(p['now'])}:now:, you were shown at most ${money(p['shown'])}:shown:. Look at the new prices and place it again. Nothing was ordered.`,
   'order-settled': (p) => $localize`This order can't be changed any more: it is ${p['stage']}:stage:.`,
@@ -44,7 +46,7 @@ export const orderingMessages = {
   'line-not-finished': (p) =>
     $localize`${p['code']}:code: ${p['name']}:name: is not finished: pack its pieces, or mark what is short.`,
   'closure-has-orders': (p) =>
-    $localize`${p['count']}:count: orders stand for ${p['day']}:day:. Move or cancel them before closing the plant.`,
+    $localize`${p['count']}:count: orders stand for ${day(p['day'])}:day:. Move or cancel them before closing the plant.`,
 
   'workbook-unreadable': () =>
     $localize`This is not a workbook that can be read. Save it as .xlsx, or start from the template.`,

@@ -1,3 +1,4 @@
+import { day } from './day-text';
 import type { MessageTable } from './message-table';
 
 /** Refusals of plant, put into words. */
@@ -11,7 +12,7 @@ export const plantMessages = {
   'lot-of-another-primal': (p) =>
     $localize`Lot ${p['lot']}:lot: is not ${p['primal']}:primal:, from which this is cut. Take a lot of it.`,
   'day-being-cut': (p) =>
-    $localize`The orders for ${p['delivery']}:delivery: are closed and are cut on ${p['day']}:day:. Finish that cutting day first, or close the plant on another day.`,
+    $localize`The orders for ${day(p['delivery'])}:delivery: are closed and are cut on ${day(p['day'])}:day:. Finish that cutting day first, or close the plant on another day.`,
   'no-day-to-cut': (p) =>
-    $localize`Orders stand for ${p['delivery']}:delivery:, and no day is left to cut them when the plant is closed on ${p['day']}:day:. Move or cancel them first.`,
+    $localize`Orders stand for ${day(p['delivery'])}:delivery:, and no day is left to cut them when the plant is closed on ${day(p['day'])}:day:. Move or cancel them first.`,
 } satisfies MessageTable;

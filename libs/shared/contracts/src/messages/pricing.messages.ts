@@ -1,3 +1,4 @@
+import { day } from './day-text';
 import type { MessageTable } from './message-table';
 
 /** Refusals of pricing, put into words. */
@@ -9,7 +10,7 @@ export const pricingMessages = {
   'specification-not-offered': () => $localize`This specification is not offered any more, or its code is not known.`,
   'price-breaks-not-rising': () => $localize`Quantities must rise from break to break.`,
   'price-from-past': () => $localize`A price can be changed from today on, not for days that are past.`,
-  'price-line-ended': (p) => $localize`This price ends before ${p['day']}:day:, so it can't change from then on.`,
+  'price-line-ended': (p) => $localize`This price ends before ${day(p['day'])}:day:, so it can't change from then on.`,
   'price-line-agreed': () => $localize`This price was agreed by a quote. To change it, send the customer a new quote.`,
   'quote-prices-backwards': () => $localize`The last day of the prices must not be before the first.`,
   'quote-answer-past': () => $localize`The last day for an answer is past. Choose one from today on.`,
@@ -20,7 +21,8 @@ export const pricingMessages = {
     p['state'] === 'accepted'
       ? $localize`This quote has already been accepted.`
       : $localize`This quote has already been declined.`,
-  'quote-expired': (p) => $localize`This quote could be answered until ${p['day']}:day:. Ask your rep for a new one.`,
+  'quote-expired': (p) =>
+    $localize`This quote could be answered until ${day(p['day'])}:day:. Ask your rep for a new one.`,
   'plate-nothing-left': () => $localize`Cooking loss and waste leave nothing to serve.`,
   'plate-food-cost': () => $localize`Say which share of the menu price the meat may cost.`,
 } satisfies MessageTable;

@@ -1,3 +1,4 @@
+import { day } from './day-text';
 import type { MessageTable } from './message-table';
 
 /** Refusals of stock, put into words. */
@@ -5,7 +6,7 @@ export const stockMessages = {
   'lot-not-released': (p) =>
     $localize`Lot ${p['lot']}:lot: is not released (it is ${p['state']}:state:). Take another lot, or have it released first.`,
   'lot-not-received-yet': (p) =>
-    $localize`Lot ${p['lot']}:lot: only arrives on ${p['day']}:day:. Take a lot that is in the chiller.`,
+    $localize`Lot ${p['lot']}:lot: only arrives on ${day(p['day'])}:day:. Take a lot that is in the chiller.`,
   'lot-past-use-by': (p) =>
     $localize`Lot ${p['lot']}:lot: must be used by ${p['useBy']}:useBy:, before this delivery. Take a fresher lot.`,
   'lot-killed-after-arrival': () => $localize`The kill date can't be after the day of arrival.`,

@@ -17,6 +17,11 @@ import type { FieldProblem } from '../states/problem-text';
     }
   `,
   styles: `
+    :host:empty {
+      // Takes no room, not even the gap between its neighbours.
+      position: absolute;
+    }
+
     :host:not(:empty) {
       display: flex;
       gap: 12px;

@@ -7,6 +7,8 @@ export interface FieldProblem {
 /** What a screen shows of a problem document. */
 export interface ProblemText {
   readonly title: string;
+  /** The answer's HTTP status; what is refused by one has a heading in plain words. */
+  readonly status?: number;
   readonly detail?: string;
   readonly errors?: readonly FieldProblem[];
 }

@@ -61,6 +61,22 @@ describe('states of a page', () => {
     expect(host.retries).toBe(1);
   });
 
+  it('error: has a heading in plain words for an HTTP status, and says nothing twice', async () => {
+    const fixture = TestBed.createComponent(ErrorState);
+    const said = 'The 30th is past. Choose a later day.';
+    fixture.componentRef.setInput('problem', {
+      title: 'Unprocessable Entity',
+      status: 422,
+      detail: said,
+      errors: [{ pointer: '/day', message: said }],
+    });
+    await fixture.whenStable();
+    const root: HTMLElement = fixture.nativeElement;
+
+    expect(root.querySelector('.title')?.textContent).toBe('Something has to be put right');
+    expect(root.textContent?.split(said)).toHaveLength(2);
+  });
+
   it('error: offers no second try where it can not help', async () => {
     const { fixture, host, part } = await drawn();
     host.retryable.set(false);
