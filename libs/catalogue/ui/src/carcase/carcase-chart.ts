@@ -10,8 +10,7 @@ import {
   output,
   signal,
 } from '@angular/core';
-import { carcaseMap, type Curve, type MapRegion, type Species } from '@seamwright/catalogue/domain';
-import { speciesName } from '../catalogue-words';
+import { carcaseMap, type Curve, type MapRegion, type Species, speciesName } from '@seamwright/catalogue/domain';
 import { regionName } from './region-names';
 import { regionTowards } from './region-walk';
 
