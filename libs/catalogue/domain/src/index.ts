@@ -66,6 +66,57 @@ export type {
   StationTime,
   VersionContent,
 } from './specification-version';
+export { blendLean, leanWithin, type BlendLean } from './schemes/blend-lean';
+export { faultsOfScheme } from './schemes/check-scheme';
+export {
+  cutOut,
+  cutOutGrams,
+  cutOutTotals,
+  shareInPpm,
+  type CutOut,
+  type CutOutLine,
+  type CutOutTotals,
+} from './schemes/cut-out';
+export {
+  addedPpm,
+  SCHEME_KINDS,
+  schemeLossPpm,
+  stepOfScheme,
+  type AddedIngredient,
+  type Blend,
+  type BlendPart,
+  type CuttingStep,
+  type SchemeContent,
+  type SchemeKind,
+  type SchemeOutput,
+} from './schemes/cutting-scheme';
+export { recipeShares, type RecipeShares } from './schemes/recipe-shares';
+export { cycleThrough } from './schemes/scheme-cycle';
+export { CUT_KEY, schemeOfVersion } from './schemes/scheme-of-version';
+export { cutCost, type CutCost } from './yields/butchers-test';
+export {
+  cuttingLoss,
+  faultsOfTest,
+  subjectOf,
+  type CuttingTestContent,
+  type TestInput,
+  type TestSubject,
+  type WeighedOutput,
+} from './yields/cutting-test';
+export { outliersAmong } from './yields/outliers';
+export {
+  awaitingVerdict,
+  TEST_VERDICTS,
+  testsToAdopt,
+  yieldsOf,
+  yieldsToAdopt,
+  type GroupYield,
+  type OutputYield,
+  type RecordedTest,
+  type TestVerdict,
+  type YieldPoint,
+} from './yields/yields-of-subject';
+export { estimateYield, type StudentT, type YieldEstimate, type YieldObservation } from './yields/yield-estimate';
 export { drawnNumbers, type DrawnNumbers } from './drawing/drawn-numbers';
 export type { Point } from './drawing/geometry';
 export { impliedDifferencePercent, impliedGrams } from './drawing/implied-weight';
