@@ -26,10 +26,8 @@ export {
 export {
   getImportTemplate,
   getOrderImport,
-  MOST_IMPORT_BYTES,
   takeOrders,
   uploadOrders,
-  WORKBOOK_MEDIA_TYPE,
   type ImportFaultWire,
   type ImportOrderWire,
   type OrderImportWire,

@@ -7,13 +7,12 @@ import {
   instant,
   line,
   minor,
+  MOST_IMPORT_BYTES,
   plantDay,
   rowVersion,
   staffOnly,
+  WORKBOOK_MEDIA_TYPE,
 } from '@seamwright/shared/contracts';
-
-export const WORKBOOK_MEDIA_TYPE = 'application/vnd.openxmlformats-officedocument.spreadsheetml.sheet';
-export const MOST_IMPORT_BYTES = 10 * 1_048_576;
 
 const importFault = z.strictObject({
   row: z.int().positive(),

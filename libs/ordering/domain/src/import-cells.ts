@@ -1,13 +1,4 @@
-import {
-  isPlantDate,
-  ok,
-  parseKg,
-  quantity,
-  refuse,
-  type PlantDate,
-  type Quantity,
-  type Result,
-} from '@seamwright/shared/util';
+import { ok, parseKg, quantity, refuse, type Quantity, type Result } from '@seamwright/shared/util';
 import { WHEN_SHORT, type WhenShort } from './when-short';
 
 const UNITS: Readonly<Record<string, Quantity['unit']>> = {
@@ -28,13 +19,6 @@ export function parseChoices(text: string): Result<Readonly<Record<string, strin
     chosen[key] = value;
   }
   return ok(chosen);
-}
-
-/** A day typed as 2026-12-03 or 3/12/2026 (day before month). Refuses `date-unreadable` (text). */
-export function parseDay(text: string): Result<PlantDate> {
-  const [, day = '', month = '', year = ''] = /^(\d{1,2})[/.](\d{1,2})[/.](\d{4})$/.exec(text) ?? [];
-  const written = year ? `${year}-${month.padStart(2, '0')}-${day.padStart(2, '0')}` : text;
-  return isPlantDate(written) ? ok(written) : refuse('date-unreadable', { text: text.slice(0, 40) });
 }
 
 /** The unit a cell names: piece(s), case(s) or kg. Refuses `unit-unknown` (text). */

@@ -1,5 +1,5 @@
-import type { PlantDate, Quantity, Result } from '@seamwright/shared/util';
-import { parseChoices, parseDay, parseQuantity, parseUnit, parseWhenShort } from './import-cells';
+import { parsePlantDate, type PlantDate, type Quantity, type Result } from '@seamwright/shared/util';
+import { parseChoices, parseQuantity, parseUnit, parseWhenShort } from './import-cells';
 import { faultAt, type ImportColumn, type ImportFault, type ImportRow } from './import-columns';
 import type { WhenShort } from './when-short';
 
@@ -81,7 +81,7 @@ function readRow(row: ImportRow): ReadRow {
   for (const column of ['customer', 'day', 'code', 'quantity', 'unit'] as const)
     if (row[column] === '') faults.push(faultAt(row.row, column, 'cell-empty'));
   if (row.note.length > 500) faults.push(faultAt(row.row, 'note', 'note-too-long', { most: 500 }));
-  const day = row.day === '' ? null : take('day', parseDay(row.day));
+  const day = row.day === '' ? null : take('day', parsePlantDate(row.day));
   const chosen = take('choices', parseChoices(row.choices));
   const unit = row.unit === '' ? null : take('unit', parseUnit(row.unit));
   const amount = row.quantity === '' || !unit ? null : take('quantity', parseQuantity(row.quantity, unit));

@@ -1,10 +1,10 @@
 import { ChangeDetectionStrategy, Component, computed, inject, signal } from '@angular/core';
 import { MatButton } from '@angular/material/button';
 import { RouterLink } from '@angular/router';
-import { MOST_IMPORT_BYTES, type ImportFaultWire, type OrderImportWire } from '@seamwright/ordering/contracts';
+import type { ImportFaultWire, OrderImportWire } from '@seamwright/ordering/contracts';
 import { OrderImports } from '@seamwright/ordering/data-access';
 import { HOUSE_CURRENCY } from '@seamwright/pricing/domain';
-import type { Problem } from '@seamwright/shared/contracts';
+import { MOST_IMPORT_BYTES, type Problem } from '@seamwright/shared/contracts';
 import { asProblem, saveFile } from '@seamwright/shared/data-access';
 import { Card, Chip, DatePipe, ErrorState, Kg, Loading, Money, PageHead } from '@seamwright/shared/ui';
 import { Choice, FileDrop, type ChoiceOption } from '@seamwright/shared/ui/forms';

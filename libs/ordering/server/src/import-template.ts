@@ -1,7 +1,7 @@
 import { Workbook } from 'exceljs';
 import { IMPORT_COLUMNS, WHEN_SHORT, type ImportColumn } from '@seamwright/ordering/domain';
-import type { FileAnswer } from '@seamwright/shared/server';
-import { IMPORT_HEADS, MOST_ROWS } from './read-order-workbook';
+import { MOST_ROWS, type FileAnswer } from '@seamwright/shared/server';
+import { IMPORT_HEADS } from './read-order-workbook';
 
 const WIDTHS: Readonly<Record<ImportColumn, number>> = {
   customer: 28,

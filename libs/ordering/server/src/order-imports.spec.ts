@@ -4,11 +4,11 @@ import {
   getImportTemplate,
   getOrderImport,
   listOrders,
-  MOST_IMPORT_BYTES,
   takeOrders,
   uploadOrders,
 } from '@seamwright/ordering/contracts';
 import { openOrderingHouse, type OrderingHouse } from '@seamwright/ordering/server/testing';
+import { MOST_IMPORT_BYTES } from '@seamwright/shared/contracts';
 import type { Caller } from '@seamwright/shared/server';
 import { newId } from '@seamwright/shared/util';
 

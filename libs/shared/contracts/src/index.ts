@@ -30,3 +30,4 @@ export {
   ppmWire,
   rowVersion,
 } from './wire';
+export { MOST_IMPORT_BYTES, WORKBOOK_MEDIA_TYPE } from './workbook';

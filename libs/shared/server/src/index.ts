@@ -28,3 +28,4 @@ export { startWorker, type Worker } from './jobs/worker';
 export { LiveHub, mayHear } from './live/live-hub';
 export { createLog, type Log } from './log';
 export { mailSubscriber, queueMail, smtpMailer, type Mailer, type NewMail } from './mail/mail';
+export { cellText, firstSheet, MOST_ROWS } from './workbooks/read-sheet';

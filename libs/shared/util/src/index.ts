@@ -32,7 +32,7 @@ export {
   type PlantDate,
 } from './plant-date';
 export { instantAt, isClockTime, plantToday } from './plant-clock';
-export { formatPlantDate } from './plant-date-text';
+export { formatPlantDate, parsePlantDate } from './plant-date-text';
 export { newId, type Id } from './identifiers';
 export { checkDigitMod10, gtin14VariableMeasure, isGtin } from './gtin';
 export { creditorReference, formatCreditorReference, isCreditorReference } from './creditor-reference';

@@ -1,5 +1,5 @@
 import { plantDate } from './plant-date';
-import { formatPlantDate } from './plant-date-text';
+import { formatPlantDate, parsePlantDate } from './plant-date-text';
 import { unwrap } from './result';
 
 describe('a day in words', () => {
@@ -12,5 +12,18 @@ describe('a day in words', () => {
   it("has its year when long, in the reader's language", () => {
     expect(formatPlantDate(date, 'long')).toBe('Tuesday 1 December 2026');
     expect(formatPlantDate(date, 'long', 'de-DE')).toBe('Dienstag, 1. Dezember 2026');
+  });
+});
+
+describe('a day as typed', () => {
+  it('is read as the standard writes it, or day before month', () => {
+    expect(parsePlantDate('2026-12-03')).toEqual({ ok: true, value: '2026-12-03' });
+    expect(parsePlantDate('3/12/2026')).toEqual({ ok: true, value: '2026-12-03' });
+    expect(parsePlantDate('03.12.2026')).toEqual({ ok: true, value: '2026-12-03' });
+  });
+
+  it('is refused where it never was, or is no day', () => {
+    for (const text of ['30/2/2026', '2026-02-30', 'tomorrow', ''])
+      expect(parsePlantDate(text)).toEqual({ ok: false, refusal: { code: 'date-unreadable', params: { text } } });
   });
 });

@@ -1,4 +1,5 @@
-import type { PlantDate } from './plant-date';
+import { isPlantDate, type PlantDate } from './plant-date';
+import { ok, refuse, type Result } from './result';
 
 const STYLES = {
   short: { weekday: 'short', day: 'numeric', month: 'short' },
@@ -20,4 +21,11 @@ export function formatPlantDate(date: PlantDate, style: keyof typeof STYLES, loc
   }
   const parts = format.formatToParts(new Date(`${date}T00:00:00Z`));
   return parts.map(({ value }, index) => (index === 1 && locale.startsWith('en') ? ' ' : value)).join('');
+}
+
+/** A day typed as 2026-12-03 or 3/12/2026 (day before month). Refuses `date-unreadable` (text). */
+export function parsePlantDate(text: string): Result<PlantDate> {
+  const [, day = '', month = '', year = ''] = /^(\d{1,2})[/.](\d{1,2})[/.](\d{4})$/.exec(text) ?? [];
+  const written = year ? `${year}-${month.padStart(2, '0')}-${day.padStart(2, '0')}` : text;
+  return isPlantDate(written) ? ok(written) : refuse('date-unreadable', { text: text.slice(0, 40) });
 }

@@ -48,17 +48,6 @@ export const orderingMessages = {
   'closure-has-orders': (p) =>
     $localize`${p['count']}:count: orders stand for ${day(p['day'])}:day:. Move or cancel them before closing the plant.`,
 
-  'workbook-unreadable': () =>
-    $localize`This is not a workbook that can be read. Save it as .xlsx, or start from the template.`,
-  'workbook-swollen': () => $localize`This workbook unpacks to more than can be read. Send the plain sheet only.`,
-  'workbook-empty': () => $localize`There is no row with an order in this workbook.`,
-  'workbook-columns': (p) =>
-    $localize`Column ${p['column']}:column: should be headed “${p['head']}:head:”. Start from the template.`,
-  'workbook-too-many-rows': (p) => $localize`At most ${p['most']}:most: rows can be read at once. Split the workbook.`,
-  'cell-formula': () => $localize`This cell holds a formula. Type the value itself.`,
-  'cell-unreadable': () => $localize`This cell can't be read. Type its value as plain text.`,
-  'cell-too-long': (p) => $localize`This is too long: at most ${p['most']}:most: letters.`,
-  'cell-empty': () => $localize`This cell must be filled in.`,
   'note-too-long': (p) => $localize`The note is too long: at most ${p['most']}:most: letters.`,
   'customer-unknown': (p) => $localize`There is no customer named “${p['name']}:name:”.`,
   'customer-ambiguous': (p) => $localize`More than one customer is named “${p['name']}:name:”.`,
@@ -68,13 +57,8 @@ export const orderingMessages = {
     $localize`A customer has one order a day: row ${p['row']}:row: names another site for the same day.`,
   'too-many-lines': (p) => $localize`One order can have at most ${p['most']}:most: lines.`,
   'choices-unreadable': (p) => $localize`“${p['part']}:part:” can't be read as a choice. Write: trim=6; portion=280`,
-  'date-unreadable': (p) => $localize`“${p['text']}:text:” is not a day. Write it as 2026-12-03 or 3/12/2026.`,
   'unit-unknown': (p) => $localize`“${p['text']}:text:” is not a unit. Use piece, case or kg.`,
   'quantity-unreadable': (p) => $localize`“${p['text']}:text:” is not a quantity.`,
   'when-short-unknown': (p) =>
     $localize`“${p['text']}:text:” is not known. Use leave-off, send-what-there-is or ask-me.`,
-  'import-taken-already': () => $localize`This workbook was taken already. Nothing was placed again.`,
-  'import-has-faults': (p) =>
-    $localize`${p['count']}:count: cells have faults, so nothing was placed. Mend them, or take the good rows only.`,
-  'import-nothing-good': () => $localize`No row of this workbook can be placed.`,
 } satisfies MessageTable;

@@ -32,5 +32,21 @@ export const sharedMessages = {
   'weight-negative': () => $localize`A weight can't be below zero.`,
   'weight-too-many-decimals': (p) => $localize`At most ${p['digits']}:digits: decimals: whole grams.`,
   'weight-too-large': () => $localize`That weight is larger than the desk can handle.`,
+  'workbook-unreadable': () =>
+    $localize`This is not a workbook that can be read. Save it as .xlsx, or start from the template.`,
+  'workbook-swollen': () => $localize`This workbook unpacks to more than can be read. Send the plain sheet only.`,
+  'workbook-empty': () => $localize`There is no row to read in this workbook.`,
+  'workbook-columns': (p) =>
+    $localize`Column ${p['column']}:column: should be headed “${p['head']}:head:”. Start from the template.`,
+  'workbook-too-many-rows': (p) => $localize`At most ${p['most']}:most: rows can be read at once. Split the workbook.`,
+  'cell-formula': () => $localize`This cell holds a formula. Type the value itself.`,
+  'cell-unreadable': () => $localize`This cell can't be read. Type its value as plain text.`,
+  'cell-too-long': (p) => $localize`This is too long: at most ${p['most']}:most: letters.`,
+  'cell-empty': () => $localize`This cell must be filled in.`,
+  'date-unreadable': (p) => $localize`“${p['text']}:text:” is not a day. Write it as 2026-12-03 or 3/12/2026.`,
+  'import-taken-already': () => $localize`This workbook was taken already. Nothing was done again.`,
+  'import-has-faults': (p) =>
+    $localize`${p['count']}:count: cells have faults, so nothing was taken. Mend them, or take the good rows only.`,
+  'import-nothing-good': () => $localize`No row of this workbook can be taken.`,
   unexpected: () => $localize`Something went wrong on our side. Nothing was half-stored; try again in a moment.`,
 } satisfies MessageTable;
