@@ -111,6 +111,79 @@ export interface CuttingDays {
   state: string;
 }
 
+export interface CuttingSchemes {
+  code: string;
+  createdAt: Timestamp;
+  id: string;
+  species: string;
+}
+
+export interface CuttingSchemeStandings {
+  reason: string | null;
+  rowVersion: Generated<number>;
+  schemeId: string;
+  since: Timestamp;
+  standing: string;
+  versionId: string;
+}
+
+export interface CuttingSchemeVersions {
+  approvedAt: Timestamp | null;
+  approvedBy: string | null;
+  authoredBy: string;
+  blend: unknown | null;
+  id: string;
+  ingredients: unknown;
+  inputNodeId: string;
+  kind: string;
+  name: string;
+  note: string;
+  outputs: unknown;
+  rowVersion: Generated<number>;
+  schemeId: string;
+  state: string;
+  version: number;
+}
+
+export interface CuttingTestImports {
+  fileHash: string;
+  fileName: string;
+  id: string;
+  readRows: unknown;
+  rowVersion: Generated<number>;
+  taken: string | null;
+  takenAt: Timestamp | null;
+  testIds: Generated<string[]>;
+  uploadedAt: Timestamp;
+  uploadedBy: string;
+}
+
+export interface CuttingTests {
+  addedGrams: number;
+  grade: string;
+  id: string;
+  inputGrams: number;
+  lossGrams: number;
+  lotCode: string;
+  note: string;
+  outputGrams: number;
+  outputs: unknown;
+  pieces: number;
+  recordedAt: Timestamp;
+  recordedBy: string;
+  rowVersion: Generated<number>;
+  schemeId: string | null;
+  schemeVersionId: string | null;
+  specificationId: string | null;
+  specificationVersionId: string | null;
+  supplier: string;
+  testedOn: string;
+  verdict: string | null;
+  verdictAt: Timestamp | null;
+  verdictBy: string | null;
+  verdictReason: string | null;
+}
+
 export interface DeliveryZones {
   cutOffTime: string;
   deliveryChargeMinor: number;
@@ -740,6 +813,11 @@ export interface DB {
   customers: Customers;
   cutNodes: CutNodes;
   cuttingDays: CuttingDays;
+  cuttingSchemes: CuttingSchemes;
+  cuttingSchemeStandings: CuttingSchemeStandings;
+  cuttingSchemeVersions: CuttingSchemeVersions;
+  cuttingTestImports: CuttingTestImports;
+  cuttingTests: CuttingTests;
   deliveryZones: DeliveryZones;
   documents: Documents;
   idempotencyKeys: IdempotencyKeys;

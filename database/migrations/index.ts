@@ -8,6 +8,7 @@ import { stock } from './0006_stock';
 import { ordering } from './0007_ordering';
 import { plant } from './0008_plant';
 import { accounts } from './0009_accounts';
+import { yields } from './0010_yields';
 
 /** Every step of the schema in order: a static list, since a bundle has no folder to read. */
 export const MIGRATIONS: readonly Migration[] = [
@@ -20,4 +21,5 @@ export const MIGRATIONS: readonly Migration[] = [
   ordering,
   plant,
   accounts,
+  yields,
 ];
