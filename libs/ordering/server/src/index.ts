@@ -6,6 +6,7 @@ import { ordersImplementations } from './orders.router';
 import type { CardPort, OrderingParts } from './ports';
 
 export type { CardPort, CardState, DayPort, OrderingParts } from './ports';
+export { countOpenOrderLines } from './count-open-lines';
 export { clearWaiting, markPacked, markShort, releaseOrdersOfDay, type ShortDeed } from './move-orders';
 export { closuresFor } from './calendar.repository';
 export { countUnpackedOfDay, lockOrder, orderById, ordersByIds, ordersOfDay } from './orders.repository';

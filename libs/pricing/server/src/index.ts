@@ -5,6 +5,7 @@ import { expireQuotesJob } from './expire-quotes.job';
 import { priceListImplementations } from './price-lists.router';
 import { quoteImplementations, type QuoteParts } from './quotes.router';
 
+export { countPriceLines } from './count-price-lines';
 export { addPriceList, type NewPriceLine, type NewPriceList } from './price-lists.repository';
 export { priceFor, type PriceRequest } from './price-for';
 
