@@ -116,7 +116,13 @@ export {
   type TestVerdict,
   type YieldPoint,
 } from './yields/yields-of-subject';
-export { estimateYield, type StudentT, type YieldEstimate, type YieldObservation } from './yields/yield-estimate';
+export {
+  estimateYield,
+  yieldOfTest,
+  type StudentT,
+  type YieldEstimate,
+  type YieldObservation,
+} from './yields/yield-estimate';
 export { drawnNumbers, type DrawnNumbers } from './drawing/drawn-numbers';
 export type { Point } from './drawing/geometry';
 export { impliedDifferencePercent, impliedGrams } from './drawing/implied-weight';

@@ -1,6 +1,8 @@
-import type { CuttingStep } from './cutting-scheme';
-
-type Broken = Pick<CuttingStep, 'inputNodeId' | 'outputs'>;
+/** A step as far as a circle needs it. */
+interface Broken {
+  readonly inputNodeId: string;
+  readonly outputs: readonly { readonly nodeId: string | null }[];
+}
 
 /**
  * The way round when `candidate` would close a circle with the steps that stand: node ids from its input back to its

@@ -1,6 +1,7 @@
 import type { MessageParams, MessageTable } from './message-table';
 import { accountsMessages } from './accounts.messages';
 import { catalogueMessages } from './catalogue.messages';
+import { cuttingMessages } from './cutting.messages';
 import { identityMessages } from './identity.messages';
 import { orderingMessages } from './ordering.messages';
 import { plantMessages } from './plant.messages';
@@ -13,6 +14,7 @@ const messages: MessageTable = {
   ...sharedMessages,
   ...identityMessages,
   ...catalogueMessages,
+  ...cuttingMessages,
   ...pricingMessages,
   ...stockMessages,
   ...orderingMessages,
