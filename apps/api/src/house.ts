@@ -8,11 +8,16 @@ import {
   stripeWebhook,
   type AccountsParts,
 } from '@seamwright/accounts/server';
-import { catalogueImplementations } from '@seamwright/catalogue/server';
+import { catalogueImplementations, schemeImplementations, yieldImplementations } from '@seamwright/catalogue/server';
 import { identityImplementations, tidyIdentity, type IdentityParts } from '@seamwright/identity/server';
-import { orderingImplementations, orderingSubscribers, type OrderingParts } from '@seamwright/ordering/server';
+import {
+  countOpenOrderLines,
+  orderingImplementations,
+  orderingSubscribers,
+  type OrderingParts,
+} from '@seamwright/ordering/server';
 import { cuttingDayPort, plantImplementations, plantSubscribers } from '@seamwright/plant/server';
-import { pricingImplementations, pricingPeriodic } from '@seamwright/pricing/server';
+import { countPriceLines, pricingImplementations, pricingPeriodic } from '@seamwright/pricing/server';
 import {
   mailSubscriber,
   smtpMailer,
@@ -91,6 +96,8 @@ export function buildHouse({ config, database, clock, log }: HouseParts): House 
     implementations: [
       ...identityImplementations(identityParts(config)),
       ...catalogueImplementations,
+      ...schemeImplementations,
+      ...yieldImplementations({ timeZone, readers: { countPriceLines, countOpenOrderLines } }),
       ...pricingImplementations({ timeZone, publicOrigin }),
       ...stockImplementations({ timeZone }),
       ...orderingImplementations(ordering),

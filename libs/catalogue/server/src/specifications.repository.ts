@@ -30,6 +30,38 @@ export async function currentVersions(
   return new Map(rows.map((row) => [row.specificationId, toVersion(row)]));
 }
 
+/** Which piece the specifications in force are cut from and which place they have themselves, each pair once. */
+export function placesCut(tx: Tx): Promise<{ sourceNodeId: string; cutNodeId: string }[]> {
+  return tx
+    .selectFrom('specificationVersions as v')
+    .innerJoin('specifications as s', 's.id', 'v.specificationId')
+    .innerJoin('specificationStandings as st', 'st.versionId', 'v.id')
+    .select(['v.sourceNodeId', 's.cutNodeId'])
+    .distinct()
+    .where('st.standing', '=', 'current')
+    .execute();
+}
+
+export interface NamedSpecification {
+  readonly specificationId: string;
+  readonly code: string;
+  readonly name: string;
+}
+
+/** Specifications in force that are cut from one of these pieces, by code. */
+export async function specificationsCutFrom(tx: Tx, nodeIds: readonly string[]): Promise<NamedSpecification[]> {
+  if (nodeIds.length === 0) return [];
+  return tx
+    .selectFrom('specificationVersions as v')
+    .innerJoin('specifications as s', 's.id', 'v.specificationId')
+    .innerJoin('specificationStandings as st', 'st.versionId', 'v.id')
+    .select(['v.specificationId', 's.code', 'v.name'])
+    .where('st.standing', '=', 'current')
+    .where('v.sourceNodeId', 'in', nodeIds)
+    .orderBy('s.code')
+    .execute();
+}
+
 /** Versions in force by code. A withdrawn or absent specification is simply missing. */
 export async function specificationsByCodes(
   tx: Tx,

@@ -1,6 +1,7 @@
 import type { Row } from '../row';
 import { accountsRows } from './accounts.rows';
 import { catalogueRows } from './catalogue.rows';
+import { cuttingRows } from './cutting.rows';
 import { identityRows } from './identity.rows';
 import { orderingRows } from './ordering.rows';
 import { plantRows } from './plant.rows';
@@ -11,6 +12,7 @@ import { stockRows } from './stock.rows';
 export const everyRow: readonly Row[] = [
   ...identityRows,
   ...catalogueRows,
+  ...cuttingRows,
   ...pricingRows,
   ...stockRows,
   ...orderingRows,
