@@ -6,6 +6,7 @@ import { buildHouse } from '../apps/api/src/house';
 import { callersOf } from './callers';
 import { seedCatalogue } from './catalogue';
 import { Chance } from './chance';
+import { seedCutting } from './cutting/seed-cutting';
 import { Desk } from './desk';
 import { at, startOfHistory } from './history/history-days';
 import { makeHistory } from './history/make-history';
@@ -38,9 +39,15 @@ export async function loadDemo({ config, database, log, anchor, say }: Loading):
   const who = (key: string) => callers.get(key) ?? system('seed');
   say(`${people.people.size} people at ${people.customers.size} customers`);
   const specificationIds = await seedCatalogue(database, { now, author: who('tamsin'), approver: who('idris') });
+  const tests = await seedCutting(database, {
+    now,
+    timeZone: config.PLANT_TIME_ZONE,
+    author: who('tamsin'),
+    approver: who('idris'),
+  });
   await seedPricing(database, { validFrom: start, specificationIds, ...people });
   await seedCalendar(desk, who('ada'), people);
-  say(`${specificationIds.size} specifications with their prices`);
+  say(`${specificationIds.size} specifications with their prices, and ${tests} cutting tests`);
   await makeHistory({
     desk,
     chance: new Chance(20_261_201),

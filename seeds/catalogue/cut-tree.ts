@@ -62,6 +62,7 @@ export const CUT_TREE: readonly CutTreeData[] = [
       ['rolled', 'Shoulder, boned and rolled'],
       ['dice', 'Diced shoulder'],
     ]),
+    lamb('breast', 'Breast, shank and neck', null, []),
   ]),
   ...speciesTree('beef', 'Beef', [
     beef('striploin', 'Striploin', seen('2140'), [['steak', 'Striploin steak', seen('2140')]]),
@@ -75,6 +76,11 @@ export const CUT_TREE: readonly CutTreeData[] = [
     ]),
     beef('brisket', 'Brisket', fromMemory('2323'), [['rolled', 'Brisket, boned and rolled']]),
     beef('flank', 'Thin flank', fromMemory('2200'), [['mince', 'Mince']]),
+    // What a side is broken into before the cuts above come of it.
+    beef('short-loin', 'Short loin', null, []),
+    beef('round', 'Round', null, []),
+    beef('plate', 'Short plate', null, []),
+    beef('shin', 'Shin', null, []),
   ]),
   ...speciesTree('pork', 'Pork', [
     pork('belly', 'Belly', fromMemory('4079'), [['boneless', 'Belly, boneless']]),
