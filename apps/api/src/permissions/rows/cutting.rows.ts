@@ -21,7 +21,11 @@ export const cuttingRows: readonly Row[] = [
   }),
   ofHouse(catalogue.moveScheme, async (world) => {
     const { code, rowVersion } = await aSubmittedScheme(world);
-    return { params: { code }, body: { move: 'send-back', reason: 'Weigh the bone again' }, ifMatch: rowVersion };
+    return {
+      params: { code },
+      body: { move: 'send-back' as const, reason: 'Weigh the bone again' },
+      ifMatch: rowVersion,
+    };
   }),
   ofHouse(catalogue.getCutOut, ({ tree, steak }) => ({
     params: { nodeId: tree.striploinId },
@@ -31,7 +35,11 @@ export const cuttingRows: readonly Row[] = [
   ofHouse(catalogue.recordTest, ({ steak }) => ({ body: testOf(steak.code) })),
   ofHouse(catalogue.judgeTest, async (world) => {
     const { id, rowVersion } = await aTest(world);
-    return { params: { testId: id }, body: { verdict: 'set-aside', reason: 'The scale stuck' }, ifMatch: rowVersion };
+    return {
+      params: { testId: id },
+      body: { verdict: 'set-aside' as const, reason: 'The scale stuck' },
+      ifMatch: rowVersion,
+    };
   }),
   ofHouse(catalogue.getYields, ({ steak }) => ({
     params: { subject: steak.code },
@@ -43,6 +51,6 @@ export const cuttingRows: readonly Row[] = [
   ofHouse(catalogue.getTestImport, async (world) => ({ params: { importId: await aTestImport(world) } })),
   ofHouse(catalogue.takeTests, async (world) => ({
     params: { importId: await aTestImport(world) },
-    body: { how: 'good-rows' },
+    body: { how: 'good-rows' as const },
   })),
 ];

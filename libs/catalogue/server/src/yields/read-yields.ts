@@ -11,7 +11,14 @@ import {
   type YieldEstimate,
 } from '@seamwright/catalogue/domain';
 import { pageFrom, readCursor, type Tx } from '@seamwright/shared/server';
-import { fraction, roundFraction, toSafeNumber, type Fraction } from '@seamwright/shared/util';
+import {
+  addFractions,
+  fraction,
+  roundFraction,
+  subtractFractions,
+  toSafeNumber,
+  type Fraction,
+} from '@seamwright/shared/util';
 import { pageOfTests, testsOf } from './cutting-tests.repository';
 import { presentTests } from './record-tests';
 import { studentT } from './student-t';
@@ -67,13 +74,13 @@ function costOf(
   );
   const usable = measured
     .filter(({ kind }) => kind === 'joint-product')
-    .reduce((sum, { weight }) => plus(sum, weight), fraction(0n));
+    .reduce((sum, { weight }) => addFractions(sum, weight), fraction(0n));
   if (usable.n === 0n) return null;
   const parts = measured
     .filter(({ kind }) => kind !== 'joint-product')
     .map(({ key, weight }) => ({ weight, value: fraction(BigInt(values.get(key) ?? 0)) }));
-  const out = parts.reduce((sum, { weight }) => plus(sum, weight), usable);
-  const loss = { weight: { n: out.d - out.n, d: out.d }, value: fraction(0n) };
+  const out = parts.reduce((sum, { weight }) => addFractions(sum, weight), usable);
+  const loss = { weight: subtractFractions(one, out), value: fraction(0n) };
   const cost = cutCost({ weight: one, price: fraction(BigInt(inputMinorPerKg)), parts: [...parts, loss] });
   return {
     inputMinorPerKg,
@@ -84,7 +91,6 @@ function costOf(
   };
 }
 
-const plus = (a: Fraction, b: Fraction): Fraction => fraction(a.n * b.d + b.n * a.d, a.d * b.d);
 const rounded = ({ n, d }: Fraction, times = 1n): number => toSafeNumber(roundFraction({ n: n * times, d }, 'half-up'));
 
 /** A page of a subject's tests, newest first. */
