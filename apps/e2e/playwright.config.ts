@@ -35,7 +35,8 @@ export default defineConfig({
     actionTimeout: PATIENCE_MS,
     navigationTimeout: PATIENCE_MS,
     screenshot: 'only-on-failure',
-    trace: 'retain-on-failure',
+    // Filming every step would cost more than the steps.
+    trace: { mode: 'retain-on-failure', screenshots: false },
     launchOptions: { executablePath: chromium, args: quiet },
   },
 });

@@ -23,7 +23,7 @@
  *   at least      60.73 + 118.00 + 58.59 = £237.32
  *   upper bound   74.23 + 118.00 + 75.33 = £267.56, which is held on the card
  *
- * Packed, net (what the scale shows less the tare of the pack):
+ * Packed, net (what the scale shows less the tare of the pack, which is 28 g, 18 g and 36 g):
  *
  *   1  1,390 + 1,430 + 1,565 g = 4.385 kg   4.385 × 12.05 = 52.839… → £52.84
  *      the third is 25 g over its 1,540 g and goes with a reason; the fourth joint is short
@@ -42,15 +42,23 @@
  *               LM-104 as usual, 1,850 g           1 piece    1.850 kg out / 0.69                     =  2.682 in
  *                                                 11         15.850                                     24.153
  *   Striploin   BF-201 trim 3, 225 g     24 + 24 = 48 pieces  10.800 kg out / (0.78 × 0.96 = 0.7488)  = 14.424 in
- *               one case was ordered as a case, the other 24 are loose; seconds, with 14.423077 kg in:
- *               trimming   240 + 14.423077 × (32 + 10) = 605.77 → 606             =   846
- *               portions   180 + 14.423077 × 12 = 173.08 → 174, + 48 × 9 = 432    =   786
- *               packing    120 + 14.423077 × 3 = 43.27 → 44, + 48 × 4 = 192       =   356
- *                                                                    1,988 s      = 34 minutes begun
+ *               one case was ordered as a case, the other 24 are loose
  *   Belly       PK-301 scored             3 + 3 = 6 pieces   21.600 kg out / 0.86                     = 25.117 in
  *               PK-301 plain                      2 pieces    7.200 kg out / 0.86                     =  8.373 in
  *                                                 8          28.800                                     33.490
  *   the day                          11 + 48 + 8 = 67        55.450 kg                                  72.067 kg
+ *
+ * Its work in seconds: set-up + kg in × seconds a kg, rounded up, + pieces × seconds a piece; minutes that have begun:
+ *
+ *               kg in        boning              trimming             portions or tying    packing         in all
+ *   LM-104 t 4  21.470747    180 + 2,362 + 500   120 + 645            60 + 800             120 + 65 + 120  4,972 = 83 min
+ *   LM-104       2.681159    180 +   295 +  50   120 +  43            60 +  80             120 +  9 +  12    969 = 17 min
+ *   BF-201      14.423077                        240 + 606            180 + 174 + 432      120 + 44 + 192  1,988 = 34 min
+ *   PK-301 sc.  25.116279    150 +   503         120 + 201 + 120                           120 + 76 +  72  1,362 = 23 min
+ *   PK-301 pl.   8.372093    150 +   168         120 +  67 +  10                           120 + 26 +  24    685 = 12 min
+ *   the day                  4,538 = 76 min      2,412 = 41 min       tying 1,000 = 17 min  1,240 = 21 min  9,976 = 167 min
+ *                                                                     portions 786 = 14 min
+ *   by primal: shoulder 4,972 + 969 = 5,941 = 100 min, belly 1,362 + 685 = 2,047 = 35 min
  */
 export const NORAS_ORDER = {
   deliveryDay: '2026-12-04',
@@ -67,7 +75,12 @@ export const NORAS_ORDER = {
     price: '£12.05/kg',
     packedMinor: 5_284,
     packedKg: '4.385',
-    packs: [{ grossGrams: 1_418 }, { grossGrams: 1_458 }, { grossGrams: 1_593, reason: 'Shape of the primal' }],
+    packedPieces: 3,
+    packs: [
+      { grossGrams: 1_418, netKg: '1.390' },
+      { grossGrams: 1_458, netKg: '1.430' },
+      { grossGrams: 1_593, netKg: '1.565', tooHeavyBy: 25, reason: 'Shape of the primal' },
+    ],
     shortBecause: 'Quality not good enough',
   },
   beef: {
@@ -83,7 +96,11 @@ export const NORAS_ORDER = {
     },
     packedMinor: 11_800,
     packedKg: '5.424',
-    packs: [466, 474, 466, 474, 466, 474, 466, 474, 466, 474, 466, 474].map((grossGrams) => ({ grossGrams })),
+    packedPieces: 24,
+    packs: Array.from({ length: 6 }).flatMap(() => [
+      { grossGrams: 466, netKg: '0.448' },
+      { grossGrams: 474, netKg: '0.456' },
+    ]),
   },
   pork: {
     code: 'PK-301',
@@ -96,7 +113,12 @@ export const NORAS_ORDER = {
     },
     packedMinor: 6_816,
     packedKg: '10.993',
-    packs: [{ grossGrams: 3_656 }, { grossGrams: 3_591 }, { grossGrams: 3_854 }],
+    packedPieces: 3,
+    packs: [
+      { grossGrams: 3_656, netKg: '3.620' },
+      { grossGrams: 3_591, netKg: '3.555' },
+      { grossGrams: 3_854, netKg: '3.818' },
+    ],
   },
   estimateMinor: 25_244,
   leastMinor: 23_732,
@@ -141,18 +163,20 @@ export const BAD_ROWS = [
   { customer: 'Quillfeather Catering', day, code: 'LM-104', quantity: -2, unit: 'piece' },
 ] as const;
 
-/** One row of a list: its name, pieces, how it was ordered, kilograms out and in. */
+/** Rows of the cutting list: pieces, how they were ordered, kilograms out and in, and minutes begun. */
 export const CUTTING_LIST = {
   shoulder: {
-    trimmed: { pieces: 10, outKg: '14.000', inKg: '21.471' },
-    usual: { pieces: 1, outKg: '1.850', inKg: '2.682' },
-    total: { pieces: 11, outKg: '15.850', inKg: '24.153' },
+    trimmed: ['10', '10 loose', '14.000', '21.471', '83'],
+    usual: ['1', '1 loose', '1.850', '2.682', '17'],
+    total: ['11', '', '15.850', '24.153', '100'],
   },
-  striploin: { pieces: 48, ordered: '1 case + 24', outKg: '10.800', inKg: '14.424', minutes: 34 },
+  striploin: ['48', '1 case + 24', '10.800', '14.424', '34'],
   belly: {
-    scored: { pieces: 6, outKg: '21.600', inKg: '25.117' },
-    plain: { pieces: 2, outKg: '7.200', inKg: '8.373' },
-    total: { pieces: 8, outKg: '28.800', inKg: '33.490' },
+    scored: ['6', '6 loose', '21.600', '25.117', '23'],
+    plain: ['2', '2 loose', '7.200', '8.373', '12'],
+    total: ['8', '', '28.800', '33.490', '35'],
   },
-  day: { pieces: 67, outKg: '55.450', inKg: '72.067' },
+  day: ['67', '', '55.450', '72.067', '167'],
+  /** Minutes begun at each station. */
+  stations: { Boning: '76', Trimming: '41', Portions: '14', Tying: '17', Packing: '21' },
 } as const;

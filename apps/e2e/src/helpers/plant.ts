@@ -1,6 +1,6 @@
 import { expect, type Locator, type Page } from '@playwright/test';
 import { confirm } from './confirm';
-import { figure } from './reading';
+import { cellsOf, figure, figures, tidy } from './reading';
 import { goTo } from './navigation';
 
 export type DayDeed = 'Close to orders' | 'Send to the floor' | 'Finish the day';
@@ -33,13 +33,32 @@ export class CuttingDayPage {
     return this.page.getByRole('tabpanel');
   }
 
-  /** A table of the shown list, by the name of its primal or customer. */
+  /** A table of the shown list, by its name or its customer's. */
   table(name: string): Locator {
     return this.page.getByRole('table', { name, exact: true });
   }
 
-  sum(term: string): Locator {
+  /** A cut of the cutting list: pieces, how they were ordered, kilograms out and in, and minutes. */
+  async cut(says: string | RegExp): Promise<string[]> {
+    return (await cellsOf(this.table('Cutting list'), says)).slice(1);
+  }
+
+  /** The same of a primal, by its name, or of all: "Total". */
+  async sumOf(name: string): Promise<string[]> {
+    const row = this.table('Cutting list')
+      .getByRole('row')
+      .filter({ has: this.page.getByRole('rowheader', { name, exact: true }) });
+    return (await row.locator('td').allInnerTexts()).map(tidy);
+  }
+
+  /** A figure of the day beside the lists. */
+  figure(term: string): Locator {
     return figure(this.page.locator('.side'), term);
+  }
+
+  /** Minutes at a station. */
+  minutesAt(station: string): Locator {
+    return figures(this.page.locator('sw-station-bars'), station).nth(1);
   }
 
   /** Downloads the day's workbook; gives where it lies. */
@@ -53,7 +72,10 @@ export class CuttingDayPage {
 export interface WeighedPack {
   /** What the scale shows, wrapping and all. */
   readonly grossGrams: number;
-  /** Why it is outside its limits. */
+  /** What is left without the wrapping. */
+  readonly netKg: string;
+  /** Grams over its limits, and why it goes all the same. */
+  readonly tooHeavyBy?: number;
   readonly reason?: string;
 }
 
@@ -100,12 +122,13 @@ export class ScalePage {
   }
 
   /** Touches the weight in and packs it. */
-  private async weigh({ grossGrams, reason }: WeighedPack): Promise<void> {
+  private async weigh({ grossGrams, netKg, tooHeavyBy, reason }: WeighedPack): Promise<void> {
     const pad = this.page.getByRole('group', { name: 'Weight in grams' });
     for (const digit of String(grossGrams)) await pad.getByRole('button', { name: digit, exact: true }).click();
+    await expect(this.page.getByRole('status', { name: 'Net weight' })).toHaveText(netKg);
     const pack = this.page.getByRole('button', { name: 'Pack', exact: true });
     if (reason !== undefined) {
-      await expect(this.verdict).toContainText('say why');
+      await expect(this.verdict).toHaveText(`Too heavy by ${tooHeavyBy} g: weigh again, or say why`);
       await expect(pack).toBeDisabled();
       await this.page
         .getByRole('group', { name: 'Why is it out of its limits?' })

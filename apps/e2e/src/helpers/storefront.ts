@@ -90,6 +90,17 @@ export class SpecificationPage {
   }
 }
 
+/** Keeps one of the processor's test cards, by its name: "Mastercard"; gives the digits it ends in. */
+export async function keepCard(page: Page, card: string): Promise<string> {
+  await page.getByRole('navigation', { name: 'Main' }).getByRole('link', { name: 'Invoices' }).click();
+  await page.getByRole('link', { name: 'Cards', exact: true }).click();
+  await page.getByRole('button', { name: 'Add a card' }).click();
+  await page.getByRole('group', { name: 'Test card' }).getByRole('radio', { name: card }).check();
+  await page.getByRole('button', { name: 'Keep this card' }).click();
+  const kept = page.getByRole('list', { name: 'Cards that are kept' }).getByRole('listitem').filter({ hasText: card });
+  return /\d{4}/.exec(await kept.innerText())?.[0] ?? '';
+}
+
 /** The basket and its checkout. */
 export class BasketPage {
   readonly sums: Locator;
