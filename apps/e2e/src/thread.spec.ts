@@ -357,7 +357,7 @@ test('the money is followed to the bank, to the penny, and the planted differenc
       expect(entries).toContain(
         `Bank ${pounds(bookedOfHistory)} + Bank differences £0.50 / Cash in transit ${pounds(payoutOfHistory.amount)}`,
       );
-      await expect(page.getByText('both sides are the same')).toBeVisible();
+      await expect(page.getByText('both sides are the same', { exact: true })).toBeVisible();
     });
   });
 });

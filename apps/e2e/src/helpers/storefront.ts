@@ -1,4 +1,5 @@
 import { expect, type Locator, type Page } from '@playwright/test';
+import { goTo } from './navigation';
 import { figure, figures, tidy } from './reading';
 
 /** What a line will come to, at least, most likely and at most, as the ladder shows it. */
@@ -90,13 +91,18 @@ export class SpecificationPage {
   }
 }
 
-/** Keeps one of the processor's test cards, by its name: "Mastercard"; gives the digits it ends in. */
-export async function keepCard(page: Page, card: string): Promise<string> {
-  await page.getByRole('navigation', { name: 'Main' }).getByRole('link', { name: 'Invoices' }).click();
+/** Gives one of the processor's test cards to be kept, by its name: "Mastercard". */
+export async function offerCard(page: Page, card: string): Promise<void> {
+  await goTo(page, 'Invoices');
   await page.getByRole('link', { name: 'Cards', exact: true }).click();
   await page.getByRole('button', { name: 'Add a card' }).click();
   await page.getByRole('group', { name: 'Test card' }).getByRole('radio', { name: card }).check();
   await page.getByRole('button', { name: 'Keep this card' }).click();
+}
+
+/** Keeps a test card; gives the digits it ends in. */
+export async function keepCard(page: Page, card: string): Promise<string> {
+  await offerCard(page, card);
   const kept = page.getByRole('list', { name: 'Cards that are kept' }).getByRole('listitem').filter({ hasText: card });
   return /\d{4}/.exec(await kept.innerText())?.[0] ?? '';
 }
