@@ -56,7 +56,7 @@ test('a rep quotes a case price, and the buyer who accepts it is told why she pa
       basis: 'case',
     }),
   );
-  await mailTo('accounts@ladle.example', `Quote ${number} for The Copper Ladle`);
+  await mailTo(NORA.email, `Quote ${number} for The Copper Ladle`);
   await as(browser, NORA, async (page) => {
     await acceptQuote(page, number);
     const steak = await findSpecification(page, beef.code, beef.code);
@@ -216,12 +216,12 @@ test('the planner closes the day; screen and workbook hold the same list', async
       const path = await cutting.workbook();
       const list = await sheetRows(path, 'Cutting list');
       expect(rowStarting(list, 'Total').slice(4, 9)).toEqual([67, 1, 43, 55.45, 72.067]);
-      expect(rowStarting(list, 'Striploin', beef.code).slice(4)).toEqual([48, 1, 24, 10.8, 14.424, 34]);
-      expect(rowStarting(list, 'Shoulder in all').slice(4, 9)).toEqual([11, 0, 11, 15.85, 24.153]);
+      expect(rowStarting(list, 'Beef striploin', beef.code).slice(4)).toEqual([48, 1, 24, 10.8, 14.424, 34]);
+      expect(rowStarting(list, 'Lamb shoulder in all').slice(4, 9)).toEqual([11, 0, 11, 15.85, 24.153]);
       const customers = await sheetRows(path, 'By customer');
       expect(rowStarting(customers, 'The Copper Ladle', orderNumber, beef.code).slice(5)).toEqual([24, 1, 0, 5.4]);
       const pull = await sheetRows(path, 'Pull list');
-      for (const [at, name] of ['Shoulder', 'Striploin', 'Belly'].entries())
+      for (const [at, name] of ['Lamb shoulder', 'Beef striploin', 'Pork belly'].entries())
         expect(rowStarting(pull, `${name} in all`).slice(3, 8)).toEqual(pulled[at]?.slice(2).map(Number));
     });
     await cutting.do('Send to the floor');

@@ -92,7 +92,7 @@ export class SpecificationPage {
 }
 
 /** Gives one of the processor's test cards to be kept, by its name: "Mastercard". */
-export async function offerCard(page: Page, card: string): Promise<void> {
+export async function offerCard(page: Page, card: string | RegExp): Promise<void> {
   await goTo(page, 'Invoices');
   await page.getByRole('link', { name: 'Cards', exact: true }).click();
   await page.getByRole('button', { name: 'Add a card' }).click();
