@@ -54,6 +54,7 @@ export async function loadDemo({ config, database, log, anchor, say }: Loading):
     people,
     callers,
     nodes: await primalsByKey(database),
+    specificationIds,
     till: await openCardTill({ origin: processorOf(config), desk, callers }, now),
     anchor,
     say,

@@ -9,9 +9,11 @@ import { ZONES } from '../scenario/calendar';
 import { CUSTOMERS, type DemoCustomer, type DemoSite } from '../scenario/customers';
 import { receiveWeek } from '../stock/seed-lots';
 import type { Till } from '../money/till';
-import { at, daysOfHistory, isWorkingDay } from './history-days';
+import { EARLY_QUOTES, TODAYS_QUOTES, type DemoQuote } from '../scenario/quotes';
+import { at, daysOfHistory, isWorkingDay, startOfHistory } from './history-days';
 import { orderAsUsual } from './order-as-usual';
 import { packDay } from './pack-day';
+import { writeQuotes } from './write-quotes';
 
 interface History {
   readonly desk: Desk;
@@ -19,6 +21,8 @@ interface History {
   readonly people: SeededPeople;
   readonly callers: ReadonlyMap<string, Caller>;
   readonly nodes: ReadonlyMap<string, CutNode>;
+  /** Ids by code. */
+  readonly specificationIds: ReadonlyMap<string, string>;
   readonly till: Till;
   readonly anchor: PlantDate;
   /** Each step says what it did. */
@@ -35,6 +39,7 @@ const SATURDAY = 6;
 export async function makeHistory(history: History): Promise<void> {
   const { desk, anchor, nodes, chance } = history;
   const planner = person(history, 'petra');
+  await quote(history, startOfHistory(anchor), EARLY_QUOTES);
   for (const day of daysOfHistory(anchor)) {
     await moveTo(history, day, '05:30');
     await receiveWeek(desk, planner, nodes, day, chance);
@@ -43,6 +48,7 @@ export async function makeHistory(history: History): Promise<void> {
     await history.till.endOfDay(day, addDays(day, 7) > anchor);
   }
   await moveTo(history, anchor, '09:00');
+  await quote(history, anchor, TODAYS_QUOTES);
   for (const delivery of deliveriesCutOn(anchor)) await takeOrders(history, delivery, 3);
   await desk.comeRound();
 }
@@ -106,10 +112,20 @@ async function takeOrders(history: History, deliveryDay: PlantDate, least = 0): 
   return wanted.length;
 }
 
+const quote = (history: History, day: PlantDate, quotes: readonly DemoQuote[]): Promise<void> =>
+  writeQuotes(quotes, {
+    desk: history.desk,
+    day,
+    person: (key) => person(history, key),
+    customerId: (key) => history.people.customers.get(key) ?? '',
+    buyerOf: (key) => person(history, buyerOf(CUSTOMERS.find((customer) => customer.key === key))),
+    specificationId: (code) => history.specificationIds.get(code) ?? '',
+  });
+
 const delivers = (site: DemoSite, day: PlantDate): boolean =>
   (ZONES[site.zone].weekdays as readonly number[]).includes(weekdayOf(day));
 
-const buyerOf = ({ buyers }: DemoCustomer): string => buyers[0]?.key ?? '';
+const buyerOf = (customer: DemoCustomer | undefined): string => customer?.buyers[0]?.key ?? '';
 
 function person({ callers }: History, key: string): Caller {
   const caller = callers.get(key);
