@@ -1,6 +1,7 @@
 import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
 import { RouterOutlet } from '@angular/router';
 import type { NavLink } from './nav-link';
+import { pageOpening } from './page-opening';
 import { SkipLink } from './skip-link';
 import { type BarFrom, TopBar } from './top-bar';
 
@@ -17,13 +18,15 @@ import { type BarFrom, TopBar } from './top-bar';
       <ng-content select="[swPerson]" />
     </sw-top-bar>
     <ng-content />
-    <main #page id="page" tabindex="-1"><router-outlet /></main>
+    <main #page id="page" tabindex="-1" [attr.aria-busy]="opening() ? 'true' : null"><router-outlet /></main>
   `,
   host: { class: 'sw-compact' },
   changeDetection: ChangeDetectionStrategy.OnPush,
 })
 export class AdminShell {
   readonly links = input<readonly NavLink[]>([]);
+
+  protected readonly opening = pageOpening();
 
   protected readonly linksFrom = computed<BarFrom>(() => {
     const count = this.links().length;

@@ -57,6 +57,17 @@ async function drawn() {
 }
 
 describe('StorefrontShell', () => {
+  it('says that a page is on its way until it is drawn', async () => {
+    const { fixture, go, root } = await drawn();
+    const page = root.querySelector('main');
+    expect(page?.getAttribute('aria-busy')).toBeNull();
+    const opening = go('/invoices');
+    fixture.detectChanges();
+    expect(page?.getAttribute('aria-busy')).toBe('true');
+    await opening;
+    expect(page?.getAttribute('aria-busy')).toBeNull();
+  });
+
   it('shows every link in the bar and in the menu, and which page is open', async () => {
     const { root } = await drawn();
     const texts = (selector: string) => [...root.querySelectorAll(selector)].map((link) => link.textContent?.trim());

@@ -1,6 +1,7 @@
 import { ChangeDetectionStrategy, Component, input } from '@angular/core';
 import { RouterOutlet } from '@angular/router';
 import type { NavLink } from './nav-link';
+import { pageOpening } from './page-opening';
 import { SkipLink } from './skip-link';
 import { TopBar } from './top-bar';
 
@@ -19,11 +20,13 @@ import { TopBar } from './top-bar';
       <ng-content select="[swAccount]" />
     </sw-top-bar>
     <ng-content />
-    <main #page id="page" tabindex="-1"><router-outlet /></main>
+    <main #page id="page" tabindex="-1" [attr.aria-busy]="opening() ? 'true' : null"><router-outlet /></main>
   `,
   host: { class: 'sw-normal' },
   changeDetection: ChangeDetectionStrategy.OnPush,
 })
 export class StorefrontShell {
   readonly links = input<readonly NavLink[]>([]);
+
+  protected readonly opening = pageOpening();
 }
