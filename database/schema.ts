@@ -99,6 +99,16 @@ export interface CutNodes {
   uneceItemSeen: Generated<boolean>;
 }
 
+export interface CutSynonyms {
+  createdAt: Timestamp;
+  id: string;
+  nodeId: string | null;
+  plain: string;
+  region: string | null;
+  specificationId: string | null;
+  term: string;
+}
+
 export interface CuttingDays {
   closedAt: Timestamp | null;
   closedBy: string | null;
@@ -724,14 +734,31 @@ export interface Specifications {
 }
 
 export interface SpecificationSearch {
-  boneState: string;
+  ageingKind: string | null;
+  ageingMinDays: number | null;
+  also: string;
+  boneStates: string[];
   code: string;
+  cutNodeId: string;
+  fatBands: string[];
+  lexemes: Generated<string>;
   name: string;
+  nodeIds: string[];
+  packTypes: string[];
+  pieceGrams: number;
+  piecesPerCase: number;
+  place: string;
+  portionBands: string[];
+  portions: string;
   primalNodeId: string | null;
+  rest: string;
+  sourceNodeId: string;
   species: string;
   specificationId: string;
+  usualChoiceKey: string;
+  usualPriceChangeMinor: number;
   versionId: string;
-  words: string;
+  words: Generated<string>;
 }
 
 export interface SpecificationStandings {
@@ -790,6 +817,7 @@ export interface SpecificationVersions {
   tareGrams: number;
   temperatureState: string;
   toleranceMm: number;
+  uneceFields: Generated<unknown>;
   uneceItem: string | null;
   uneceItemSeen: Generated<boolean>;
   version: number;
@@ -802,6 +830,17 @@ export interface StaffCustomers {
   personId: string;
 }
 
+export interface UneceFieldValues {
+  field: string;
+  id: string;
+  meaning: string;
+  rowVersion: Generated<number>;
+  seen: boolean;
+  source: string | null;
+  species: string | null;
+  value: string;
+}
+
 export interface DB {
   appClock: AppClock;
   auditEntries: AuditEntries;
@@ -812,6 +851,7 @@ export interface DB {
   customerGroups: CustomerGroups;
   customers: Customers;
   cutNodes: CutNodes;
+  cutSynonyms: CutSynonyms;
   cuttingDays: CuttingDays;
   cuttingSchemes: CuttingSchemes;
   cuttingSchemeStandings: CuttingSchemeStandings;
@@ -866,4 +906,5 @@ export interface DB {
   specificationStandings: SpecificationStandings;
   specificationVersions: SpecificationVersions;
   staffCustomers: StaffCustomers;
+  uneceFieldValues: UneceFieldValues;
 }

@@ -9,6 +9,8 @@ import { ordering } from './0007_ordering';
 import { plant } from './0008_plant';
 import { accounts } from './0009_accounts';
 import { yields } from './0010_yields';
+import { search } from './0011_search';
+import { unece } from './0012_unece';
 
 /** Every step of the schema in order: a static list, since a bundle has no folder to read. */
 export const MIGRATIONS: readonly Migration[] = [
@@ -22,4 +24,6 @@ export const MIGRATIONS: readonly Migration[] = [
   plant,
   accounts,
   yields,
+  search,
+  unece,
 ];

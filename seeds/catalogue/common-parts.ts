@@ -31,8 +31,15 @@ export const sizeOf = (lengthMm: number, widthMm: number, heightMm: number, tole
   toleranceMm,
 });
 
+/** With the packing field of the UNECE code, whose digit is from memory. */
 export const vacuum = (piecesPerPack: number, packsPerCase: number, tareGrams: number) =>
-  ({ packType: 'vacuum', piecesPerPack, packsPerCase, tareGrams: grams(tareGrams) }) as const;
+  ({
+    packType: 'vacuum',
+    piecesPerPack,
+    packsPerCase,
+    tareGrams: grams(tareGrams),
+    uneceFields: { packing: '5' },
+  }) as const;
 
 /** Per cent of the primal that becomes the cut; per cent lost in cooking, as commonly met. */
 export const yields = (yieldPercent: number, cookingLossPercent: number) => ({
@@ -76,4 +83,10 @@ export const tying = at('tying');
 export const packing = at('packing');
 
 /** Nothing about a version is left open that these don't state. */
-export const plainCut = { ageing: null, ribs: null, choiceRules: [], ...noAllergens } satisfies Partial<VersionContent>;
+export const plainCut = {
+  ageing: null,
+  ribs: null,
+  choiceRules: [],
+  uneceFields: {},
+  ...noAllergens,
+} satisfies Partial<VersionContent>;

@@ -1,6 +1,7 @@
 import type { CutNode } from '@seamwright/catalogue/domain';
 import {
   addCutNodes,
+  addSynonym,
   approveVersion,
   createSpecification,
   createVersion,
@@ -10,6 +11,7 @@ import { inTransaction, type Caller, type Database } from '@seamwright/shared/se
 import { newId } from '@seamwright/shared/util';
 import { CUT_TREE } from './cut-tree';
 import { SPECIFICATIONS } from './specifications';
+import { SYNONYMS } from './synonyms';
 
 interface CatalogueSeed {
   readonly now: Date;
@@ -18,7 +20,7 @@ interface CatalogueSeed {
   readonly approver: Caller;
 }
 
-/** Loads cut tree and specifications through the use cases; gives the specification ids by code. */
+/** Loads cut tree, other names and specifications through the use cases; gives the specification ids by code. */
 export async function seedCatalogue(
   database: Database,
   { now, author, approver }: CatalogueSeed,
@@ -32,6 +34,11 @@ export async function seedCatalogue(
   const specificationIds = new Map<string, string>();
   const versionIds = await inTransaction(database, author, async (tx) => {
     await addCutNodes(tx, nodesOf(nodeId));
+    for (const { cut, region, terms } of SYNONYMS) {
+      for (const term of terms) {
+        await addSynonym(tx, { now, added: { nodeId: nodeId(cut), specificationId: null, term, region } });
+      }
+    }
     const written: string[] = [];
     for (const { code, cut, source, ...content } of SPECIFICATIONS) {
       const specificationId = await createSpecification(tx, { now, code, cutNodeId: nodeId(cut) });

@@ -1,8 +1,6 @@
 import * as z from 'zod';
-import { BONE_STATES, SPECIES } from '@seamwright/catalogue/domain';
 import {
   defineEndpoint,
-  id,
   line,
   pageOf,
   pageQuery,
@@ -10,40 +8,12 @@ import {
   staffOnly,
   type Access,
 } from '@seamwright/shared/contracts';
-import {
-  cutNodeWire,
-  publicSpecification,
-  specificationCard,
-  specificationRow,
-  staffSpecification,
-} from './specification.wire';
+import { cutNodeWire, publicSpecification, specificationRow, staffSpecification } from './specification.wire';
 
 /** The catalogue is the same for everybody who is signed in. */
 const signedIn: Access = { who: 'roles', roles: ROLES, customer: 'none' };
 const code = z.string().regex(/^[A-Z]{2}-\d{3}$/);
 const words = z.string().trim().max(100);
-
-const counts = z.strictObject({
-  species: z.array(z.strictObject({ species: z.enum(SPECIES), count: z.int() })),
-  primals: z.array(z.strictObject({ id, name: z.string(), species: z.enum(SPECIES), count: z.int() })),
-  boneStates: z.array(z.strictObject({ boneState: z.enum(BONE_STATES), count: z.int() })),
-});
-
-export const searchSpecifications = defineEndpoint({
-  id: 'catalogue.search',
-  summary: 'Finds specifications by words, code and filters, with how many each filter would leave',
-  method: 'GET',
-  path: '/specifications',
-  access: signedIn,
-  query: {
-    ...pageQuery,
-    q: words.optional(),
-    species: z.enum(SPECIES).optional(),
-    primal: id.optional(),
-    boneState: z.enum(BONE_STATES).optional(),
-  },
-  response: z.strictObject({ ...pageOf(specificationCard).shape, counts }),
-});
 
 export const getSpecification = defineEndpoint({
   id: 'catalogue.specification',

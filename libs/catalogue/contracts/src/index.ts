@@ -3,7 +3,6 @@ export {
   getSpecification,
   getStaffSpecification,
   listVersions,
-  searchSpecifications,
   withdrawSpecification,
 } from './catalogue.endpoints';
 export {
@@ -36,3 +35,7 @@ export {
   takeTests,
   uploadTests,
 } from './yields.endpoints';
+export { addUneceValue, correctUneceValue, listUneceValues, readUnece } from './unece.endpoints';
+export type { UneceReadingWire, UneceValueWire, VersionUneceCode } from './unece.wire';
+export { SEARCH_SORTS, searchSpecifications, type SearchSort } from './search.endpoints';
+export { addSynonym, listSynonyms, removeSynonym, type SynonymWire } from './synonyms.endpoints';

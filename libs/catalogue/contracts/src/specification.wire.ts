@@ -15,6 +15,7 @@ import {
   VERSION_STATES,
 } from '@seamwright/catalogue/domain';
 import { gramsWire, id, instant, minor, ppmWire, rowVersion } from '@seamwright/shared/contracts';
+import { uneceFieldsWire, versionUneceCode } from './unece.wire';
 
 const millimetres = z.int().meta({ description: 'Whole millimetres' });
 const seconds = z.int().meta({ description: 'Whole seconds' });
@@ -133,6 +134,8 @@ export const staffSpecification = z.strictObject({
   state: z.enum(VERSION_STATES),
   standing: z.enum(STANDINGS).nullable(),
   sourceName: z.string(),
+  uneceFields: uneceFieldsWire,
+  unece: versionUneceCode,
   tareGrams: gramsWire,
   yieldPpm: ppmWire,
   choices: z.array(

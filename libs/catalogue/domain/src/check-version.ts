@@ -2,19 +2,29 @@ import { isGtin, type Refusal } from '@seamwright/shared/util';
 import { choiceKey } from './choice-key';
 import { brokenRule, withDefaults } from './choice-rules';
 import type { Choice, ChoiceRule } from './choices';
+import type { Species } from './cut-words';
 import type { VersionContent } from './specification-version';
+import type { UneceFieldValue } from './unece/field-values';
+import { faultsOfUneceFields } from './unece/version-code';
+
+/** What the fields of the UNECE code can hold, and the species that they are read for. */
+export interface UneceLists {
+  readonly species: Species;
+  readonly values: readonly UneceFieldValue[];
+}
 
 /**
  * Everything that is wrong with what an author wrote, each with a pointer to its field; empty when it may be sent to
- * review. Codes begin with `version-`.
+ * review. Codes begin with `version-`, those of the UNECE code with `unece-`; without the lists only its form is checked.
  */
-export function faultsOfVersion(content: VersionContent): Refusal[] {
+export function faultsOfVersion(content: VersionContent, unece?: UneceLists): Refusal[] {
   return [
     ...faultsOfNumbers(content),
     ...faultsOfText(content),
     ...faultsOfWeights(content),
     ...content.choices.flatMap((choice, at) => faultsOfChoice(choice, `/choices/${at}`)),
     ...faultsOfRules(content.choices, content.choiceRules),
+    ...faultsOfUneceFields(content, unece?.species, unece?.values),
   ];
 }
 

@@ -6,7 +6,7 @@ export {
   type OfferedValue,
   type VersionChanges,
 } from './choices';
-export { faultsOfVersion } from './check-version';
+export { faultsOfVersion, type UneceLists } from './check-version';
 export { choiceKey } from './choice-key';
 export { whyForbidden, withDefaults } from './choice-rules';
 export { CUT_LEVELS, pathTo, primalOf, type CutLevel, type CutNode } from './cut-node';
@@ -128,3 +128,27 @@ export type { Point } from './drawing/geometry';
 export { impliedDifferencePercent, impliedGrams } from './drawing/implied-weight';
 export { specDrawing, type Drawing, type Frame, type Measure } from './drawing/spec-drawing';
 export type { Part, Shape, ViewName } from './drawing/view';
+export { type UneceFieldValue } from './unece/field-values';
+export { gs1MeatCut } from './unece/gs1-meat-cut';
+export {
+  CHOSEN_UNECE_FIELDS,
+  fillsUneceField,
+  UNECE_FIELDS,
+  UNECE_LAYOUT,
+  type ChosenUneceField,
+  type UneceField,
+  type UneceFieldLayout,
+} from './unece/layout';
+export { readUneceCode, type UneceFieldReading, type UneceReading } from './unece/read-code';
+export { uneceCodeOf, type UneceFields } from './unece/version-code';
+export {
+  FAT_BANDS,
+  fatBandOf,
+  PORTION_BANDS,
+  portionBandGrams,
+  portionBandOf,
+  type FatBand,
+  type PortionBand,
+} from './search/bands';
+export { findable, type Findable } from './search/findable';
+export { plainWords } from './search/plain-words';

@@ -13,6 +13,7 @@ import type {
   TemperatureState,
 } from './cut-words';
 import type { Standing, VersionState } from './specification.states';
+import type { UneceFields } from './unece/version-code';
 
 /** Length, width and height in whole millimetres, as the drawing kind reads them. */
 export interface Dimensions {
@@ -77,6 +78,8 @@ export interface VersionContent extends OfferedNumbers<ChoiceValue> {
   readonly uneceItem: string | null;
   readonly uneceItemSeen: boolean;
   readonly fatCode: string | null;
+  /** The fields of the UNECE code that don't follow from the version itself. */
+  readonly uneceFields: UneceFields;
   /** Where it is separated, in anatomical words. */
   readonly cuttingLines: string;
   readonly removed: readonly string[];

@@ -3,7 +3,6 @@ import {
   getSpecification,
   getStaffSpecification,
   listVersions,
-  searchSpecifications,
   withdrawSpecification,
 } from '@seamwright/catalogue/contracts';
 import { aChoice, aValue } from '@seamwright/catalogue/domain/testing';
@@ -47,53 +46,6 @@ describe('the catalogue over HTTP', () => {
 
   const add = (code: string, where: { cutNodeId: string; sourceNodeId: string }, content = {}) =>
     addTestSpecification(house.database, { now: TEST_NOW, people, code, ...where, content });
-  const search = (query: Parameters<typeof house.call<typeof searchSpecifications>>[2]['query']) =>
-    house.call(buyer, searchSpecifications, { query: query ?? {} });
-  const found = async (q: string) => (await search({ q })).body.items.map(({ code }) => code);
-
-  it('finds by name, code, place in the cut tree and summary', async () => {
-    expect(await found('rolled shoulder')).toEqual(['LM-101']);
-    expect(await found('lm-101')).toEqual(['LM-101']);
-    expect(await found('beef')).toEqual(['BF-201', 'BF-202']);
-    expect(await found('roasting')).toEqual(['LM-101']);
-  });
-
-  it('forgives a typing mistake', async () => {
-    expect(await found('shuolder')).toEqual(['LM-101']);
-    expect(await found('striplion')).toEqual(['BF-202', 'BF-201'].sort());
-  });
-
-  it('finds nothing for what is not there, nor for signs that mean something to the database', async () => {
-    expect(await found('venison')).toEqual([]);
-    expect(await found('%')).toEqual([]);
-    expect(await found('_ \\')).toEqual([]);
-  });
-
-  it('filters, and counts what each other filter would leave', async () => {
-    const { body } = await search({ species: 'beef', boneState: 'bone-in' });
-    expect(body.items.map(({ code }) => code)).toEqual(['BF-202']);
-    expect(body.counts).toEqual({
-      species: [
-        { species: 'lamb', count: 0 },
-        { species: 'beef', count: 1 },
-      ],
-      primals: [{ id: tree.striploinId, name: 'Striploin', species: 'beef', count: 1 }],
-      boneStates: [
-        { boneState: 'bone-in', count: 1 },
-        { boneState: 'boneless', count: 1 },
-      ],
-    });
-    expect((await search({ primal: tree.shoulderId })).body.items.map(({ code }) => code)).toEqual(['LM-101']);
-  });
-
-  it('pages without gap or repeat, with words and without', async () => {
-    for (const q of [undefined, 'striploin']) {
-      const first = await search({ q, limit: 1 });
-      const second = await search({ q, limit: 1, cursor: first.body.nextCursor ?? '' });
-      expect([...first.body.items, ...second.body.items].map(({ code }) => code)).toEqual(['BF-201', 'BF-202']);
-    }
-    expect((await search({ cursor: 'nonsense' })).problem).toMatchObject({ status: 422, code: 'invalid' });
-  });
 
   it('shows a buyer the version in force with its choices, and nothing of what it costs the plant', async () => {
     const { status, body } = await house.call(buyer, getSpecification, { params: { code: 'BF-201' } });
@@ -147,7 +99,7 @@ describe('the catalogue over HTTP', () => {
   });
 
   it('is closed to whoever is not signed in', async () => {
-    expect((await house.call({ kind: 'anonymous' }, searchSpecifications, { query: {} })).status).toBe(401);
+    expect((await house.call({ kind: 'anonymous' }, getCutTree, {})).status).toBe(401);
   });
 
   it('withdraws with a reason: neither found nor shown to buyers any more, once only', async () => {
@@ -161,7 +113,6 @@ describe('the catalogue over HTTP', () => {
 
     const done = await house.call(people.author, withdrawSpecification, { ...withdrawal, ifMatch: 1 });
     expect(done.body).toMatchObject({ standing: 'withdrawn', rowVersion: 2, versions: [{ reason: 'No longer cut' }] });
-    expect(await found('minute')).toEqual([]);
     const gone = await house.call(buyer, getSpecification, { params: { code: 'BF-203' } });
     expect(gone.problem).toMatchObject({ status: 404, code: 'specification-withdrawn' });
     expect(gone.problem.detail).toContain('BF-203');

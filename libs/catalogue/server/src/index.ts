@@ -1,6 +1,10 @@
 export { approveVersion } from './approve-version';
 export { catalogueImplementations } from './catalogue.router';
 export { addCutNodes, cutNodes } from './cut-nodes.repository';
+export { addSynonym, type NewSynonym } from './keep-synonyms';
+export type { PricePort, StockPort, UsualOffer } from './search-ports';
+export type { SearchParts } from './search-catalogue';
+export { searchImplementations } from './search.router';
 export { currentVersions, specificationsByCodes, versionsByIds } from './specifications.repository';
 export { withdrawSpecification } from './withdraw-specification';
 export { createSpecification, createVersion, submitVersion } from './write-version';

@@ -1,62 +1,12 @@
 import * as z from 'zod';
-import type { Answer, CheckedInput } from '@seamwright/shared/contracts';
-import type {
-  PublicSpecification,
-  SpecificationRow,
-  StaffSpecification,
-  searchSpecifications,
-} from '@seamwright/catalogue/contracts';
-import { primalOf, type BoneState, type CutNode, type Species } from '@seamwright/catalogue/domain';
+import type { PublicSpecification, SpecificationRow, StaffSpecification } from '@seamwright/catalogue/contracts';
+import { primalOf, type Species } from '@seamwright/catalogue/domain';
 import { notFound, pageFrom, ProblemError, readCursor, type Tx } from '@seamwright/shared/server';
 import { cutNodes } from './cut-nodes.repository';
-import { countByFilter, findSpecifications, type FilterCount } from './search.repository';
-import { presentCard, presentPublic, presentStaff } from './specification.presenter';
+import { presentPublic, presentStaff } from './specification.presenter';
 import { currentVersions, namesOf, specificationByCode, versionEntries, versionOf } from './specifications.repository';
 import { newestVersions } from './technical-list.repository';
-
-type Query = CheckedInput<typeof searchSpecifications>['query'];
-type SearchAnswer = Answer<typeof searchSpecifications>;
-
-/** A page of the catalogue with the counts beside its filters. */
-export async function searchCatalogue(tx: Tx, { cursor, limit, ...filters }: Query): Promise<SearchAnswer> {
-  const nodes = await cutNodes(tx);
-  const found = await findSpecifications(tx, filters, { limit, after: cursor ? placeOf(cursor) : null });
-  const versions = await currentVersions(
-    tx,
-    found.map(({ specificationId }) => specificationId),
-  );
-  const page = pageFrom(
-    found,
-    limit,
-    ({ score, code }) => [score, code],
-    ({ specificationId }) => {
-      const version = versions.get(specificationId);
-      if (!version) throw new Error(`${specificationId} can be found but has no version in force`);
-      return presentCard(version, nodes);
-    },
-  );
-  return { ...page, counts: countsOf(await countByFilter(tx, filters), nodes) };
-}
-
-function placeOf(cursor: string): { score: number; code: string } {
-  const [score, code] = readCursor(cursor, z.tuple([z.int(), z.string()]));
-  return { score, code };
-}
-
-function countsOf(counts: readonly FilterCount[], nodes: ReadonlyMap<string, CutNode>): SearchAnswer['counts'] {
-  const byFilter = (filter: FilterCount['filter']) =>
-    new Map(counts.filter((each) => each.filter === filter).map(({ value, count }) => [value, count]));
-  const [species, primals, boneStates] = [byFilter('species'), byFilter('primal'), byFilter('boneState')];
-  return {
-    species: [...nodes.values()]
-      .filter(({ level }) => level === 'species')
-      .map((node) => ({ species: node.species, count: species.get(node.species) ?? 0 })),
-    primals: [...nodes.values()]
-      .filter(({ id }) => primals.has(id))
-      .map(({ id, name, species: of }) => ({ id, name, species: of, count: primals.get(id) ?? 0 })),
-    boneStates: [...boneStates].sort().map(([boneState, count]) => ({ boneState: boneState as BoneState, count })),
-  };
-}
+import { uneceFieldValues } from './unece-values.repository';
 
 /** The version in force of a code as a buyer sees it. Refuses with `specification-withdrawn` or `not-found`, both 404. */
 export async function readSpecification(tx: Tx, code: string): Promise<PublicSpecification> {
@@ -78,7 +28,12 @@ export async function readStaffSpecification(tx: Tx, code: string, asked?: numbe
   const version = await versionOf(tx, specification.id, asked ?? inForce?.version);
   if (!version) throw notFound();
   const people = [version.authoredBy, ...(version.approvedBy === null ? [] : [version.approvedBy])];
-  return presentStaff(version, { nodes: await cutNodes(tx), entries, names: await namesOf(tx, people) });
+  return presentStaff(version, {
+    nodes: await cutNodes(tx),
+    entries,
+    names: await namesOf(tx, people),
+    uneceValues: await uneceFieldValues(tx),
+  });
 }
 
 /** A page of the technical list. */

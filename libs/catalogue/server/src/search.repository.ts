@@ -1,103 +1,84 @@
 import { sql, type RawBuilder } from 'kysely';
-import type { BoneState, Species } from '@seamwright/catalogue/domain';
+import type { SearchSort } from '@seamwright/catalogue/contracts';
 import type { Tx } from '@seamwright/shared/server';
-
-export interface SearchFilters {
-  readonly q?: string | undefined;
-  readonly species?: Species | undefined;
-  readonly primal?: string | undefined;
-  readonly boneState?: BoneState | undefined;
-}
+import { activeFilters, allOf, type PriceLists, type SearchFilters } from './search-filters';
+import type { UsualOffer } from './search-ports';
+import { fits, scoreOf, type SearchWord } from './search-words';
 
 export interface Found {
   readonly specificationId: string;
   readonly code: string;
-  /** How well the words fit; higher comes first. */
-  readonly score: number;
+  /** What it is sorted by, before its code: the fit, the name, the grams of a piece or the price. */
+  readonly place: number | string;
 }
 
-const MOST_WORDS = 8;
-/** How alike a word must be to count as mistyped; "shuolder" is like "shoulder" by 0.385, two letters changed over. */
-const ALIKE = '0.38';
+export interface Wanted {
+  readonly words: readonly SearchWord[];
+  readonly filters: SearchFilters;
+  readonly sort: SearchSort;
+  /** For the sort by price: what has none is not found. */
+  readonly prices: PriceLists | null;
+  readonly after: Pick<Found, 'place' | 'code'> | null;
+  readonly limit: number;
+}
 
-const wordsOf = (q = ''): string[] => q.split(/\s+/).filter(Boolean).slice(0, MOST_WORDS);
-const contains = (word: string): string => `%${word.replace(/[\\%_]/g, '\\$&')}%`;
-
-/** A page of what fits all words and filters, best first, then by code. */
-export async function findSpecifications(
-  tx: Tx,
-  filters: SearchFilters,
-  { limit, after }: { limit: number; after: Pick<Found, 'score' | 'code'> | null },
-): Promise<Found[]> {
-  await forgiveMistakes(tx, filters);
-  const words = wordsOf(filters.q);
-  const from = after ? sql`where score < ${after.score} or (score = ${after.score} and code > ${after.code})` : sql``;
+/** A page of what fits all words and filters, in the order asked, then by code; one more than `limit`. */
+export async function findSpecifications(tx: Tx, wanted: Wanted): Promise<Found[]> {
+  const { words, filters, sort, prices, after, limit } = wanted;
+  const { place, from, type } = orderOf(sort, words, prices);
+  const bestFirst = sort === 'fit' && words.length > 0;
+  const beyond = after && {
+    place: sql`${after.place}::${sql.raw(type)}`,
+    later: bestFirst ? sql`<` : sql`>`,
+  };
   const { rows } = await sql<Found>`
     with found as (
-      select specification_id as "specificationId", code, ${scoreOf(words)} as score
-      from specification_search
-      where ${fits(words)} and ${inSpecies(filters)} and ${inPrimal(filters)} and ${inBoneState(filters)}
+      select specification_id as "specificationId", code, ${place} as place
+      from ${from} where ${fits(words)} and ${allOf(activeFilters(filters))}
     )
-    select * from found ${from} order by score desc, code limit ${limit + 1}
+    select * from found
+    ${beyond ? sql`where place ${beyond.later} ${beyond.place} or (place = ${beyond.place} and code > ${after.code})` : sql``}
+    order by ${bestFirst ? sql`place desc, code` : sql`place, code`} limit ${limit + 1}
   `.execute(tx);
   return rows;
 }
 
-export interface FilterCount {
-  readonly filter: 'species' | 'primal' | 'boneState';
-  readonly value: string;
-  readonly count: number;
+interface Order {
+  readonly place: RawBuilder<unknown>;
+  readonly type: 'integer' | 'text' | 'bigint';
+  readonly from: RawBuilder<unknown>;
 }
 
-/** How many specifications each value of a filter would leave, the other filters kept. */
-export async function countByFilter(tx: Tx, filters: SearchFilters): Promise<FilterCount[]> {
-  await forgiveMistakes(tx, filters);
-  const { rows } = await sql<FilterCount>`
-    with found as materialized (
-      select species, primal_node_id, bone_state from specification_search where ${fits(wordsOf(filters.q))}
-    )
-    select 'species' as filter, species as value, count(*)::int as count
-      from found where ${inPrimal(filters)} and ${inBoneState(filters)} group by species
-    union all
-    select 'primal', primal_node_id::text, count(*)::int
-      from found where primal_node_id is not null and ${inSpecies(filters)} and ${inBoneState(filters)} group by primal_node_id
-    union all
-    select 'boneState', bone_state, count(*)::int
-      from found where ${inSpecies(filters)} and ${inPrimal(filters)} group by bone_state
+function orderOf(sort: SearchSort, words: readonly SearchWord[], prices: PriceLists | null): Order {
+  const from = sql`specification_search`;
+  if (sort === 'name') return { place: sql`name`, type: 'text', from };
+  if (sort === 'portion') return { place: sql`piece_grams`, type: 'bigint', from };
+  if (sort === 'price' && prices) return { place: sql`minor`, type: 'bigint', from: pricedSpecifications(prices) };
+  return { place: scoreOf(words), type: 'integer', from };
+}
+
+const pricedSpecifications = ({ ids, minor }: PriceLists): RawBuilder<unknown> =>
+  sql`specification_search join unnest(${ids}::uuid[], ${minor}::bigint[]) as priced (id, minor) on id = specification_id`;
+
+/** What has a price among what fits all words and filters, and from what to what per kg. */
+export async function countPriced(
+  tx: Tx,
+  { words, filters, prices }: { words: readonly SearchWord[]; filters: SearchFilters; prices: PriceLists },
+): Promise<{ count: number; lowestMinor: number | null; highestMinor: number | null }> {
+  const { rows } = await sql<{ count: number; lowestMinor: number | null; highestMinor: number | null }>`
+    select count(*)::int as count, min(minor) as "lowestMinor", max(minor) as "highestMinor"
+    from ${pricedSpecifications(prices)} where ${fits(words)} and ${allOf(activeFilters(filters))}
+  `.execute(tx);
+  return rows[0] ?? { count: 0, lowestMinor: null, highestMinor: null };
+}
+
+/** Everything that fits the words, as it is offered when nothing is chosen. */
+export async function usualOffers(tx: Tx, words: readonly SearchWord[]): Promise<UsualOffer[]> {
+  const { rows } = await sql<UsualOffer>`
+    select specification_id as "specificationId", usual_choice_key as "usualChoiceKey",
+      usual_price_change_minor as "usualPriceChangeMinorPerKg", piece_grams as "pieceGrams",
+      pieces_per_case as "piecesPerCase"
+    from specification_search where ${fits(words)}
   `.execute(tx);
   return rows;
-}
-
-/** The operator that the trigram index serves reads its limit from a setting, kept to this transaction. */
-async function forgiveMistakes(tx: Tx, { q }: SearchFilters): Promise<void> {
-  if (!q) return;
-  await sql`select set_config('pg_trgm.word_similarity_threshold', ${ALIKE}, true)`.execute(tx);
-}
-
-type Condition = RawBuilder<unknown>;
-
-const always: Condition = sql`true`;
-const inSpecies = ({ species }: SearchFilters): Condition => (species ? sql`species = ${species}` : always);
-const inPrimal = ({ primal }: SearchFilters): Condition => (primal ? sql`primal_node_id = ${primal}` : always);
-const inBoneState = ({ boneState }: SearchFilters): Condition => (boneState ? sql`bone_state = ${boneState}` : always);
-
-/** Every word stands in the text, whole, in part or nearly. */
-function fits(words: readonly string[]): Condition {
-  if (words.length === 0) return always;
-  return sql.join(
-    words.map((word) => sql`(words ilike ${contains(word)} or ${word}::text <% words)`),
-    sql` and `,
-  );
-}
-
-/** Whole numbers, so that a page's end can be written into its cursor: code before name before anything else. */
-function scoreOf(words: readonly string[]): RawBuilder<number> {
-  if (words.length === 0) return sql<number>`0`;
-  const each = words.map(
-    (word) => sql`(
-      case when code ilike ${contains(word)} then 4000 when name ilike ${contains(word)} then 2000 else 0 end
-      + round(word_similarity(${word}, name) * 1000)::int + round(word_similarity(${word}, words) * 300)::int
-    )`,
-  );
-  return sql<number>`(${sql.join(each, sql` + `)})`;
 }

@@ -1,6 +1,13 @@
-import { pathTo, type CutNode, type OfferedValue, type SpecificationVersion } from '@seamwright/catalogue/domain';
+import {
+  pathTo,
+  type CutNode,
+  type OfferedValue,
+  type SpecificationVersion,
+  type UneceFieldValue,
+} from '@seamwright/catalogue/domain';
 import type { PublicSpecification, SpecificationCard, StaffSpecification } from '@seamwright/catalogue/contracts';
 import type { VersionEntry } from './specifications.repository';
+import { presentVersionCode } from './unece.presenter';
 
 type Nodes = ReadonlyMap<string, CutNode>;
 
@@ -16,9 +23,12 @@ export interface StaffParts {
   readonly nodes: Nodes;
   readonly entries: readonly VersionEntry[];
   readonly names: ReadonlyMap<string, string>;
+  /** What the fields of the UNECE code can hold. */
+  readonly uneceValues: readonly UneceFieldValue[];
 }
 
-export function presentStaff(version: SpecificationVersion, { nodes, entries, names }: StaffParts): StaffSpecification {
+export function presentStaff(version: SpecificationVersion, parts: StaffParts): StaffSpecification {
+  const { nodes, entries, names, uneceValues } = parts;
   const own = entries.find(({ versionId }) => versionId === version.id);
   return {
     ...publicFields(version, nodes),
@@ -27,6 +37,8 @@ export function presentStaff(version: SpecificationVersion, { nodes, entries, na
     state: version.state,
     standing: version.standing,
     sourceName: nodes.get(version.sourceNodeId)?.name ?? '',
+    uneceFields: version.uneceFields,
+    unece: presentVersionCode(version, uneceValues),
     tareGrams: version.tareGrams,
     yieldPpm: version.yieldPpm,
     choices: version.choices.map((choice) => ({ ...choice, values: [...choice.values] })),

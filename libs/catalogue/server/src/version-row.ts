@@ -30,8 +30,19 @@ export function toVersion(row: VersionRow): SpecificationVersion {
 
 /** The columns of what an author wrote. */
 export function contentColumns(content: VersionContent) {
-  const { ageing, removed, allergens, mayContain, steps, stations, choices, choiceRules, otherOutputs, ...rest } =
-    content;
+  const {
+    ageing,
+    removed,
+    allergens,
+    mayContain,
+    uneceFields,
+    steps,
+    stations,
+    choices,
+    choiceRules,
+    otherOutputs,
+    ...rest
+  } = content;
   return {
     ...rest,
     removed: [...removed],
@@ -40,6 +51,7 @@ export function contentColumns(content: VersionContent) {
     ageingKind: ageing?.kind ?? null,
     ageingMinDays: ageing?.minDays ?? null,
     ageingMaxDays: ageing?.maxDays ?? null,
+    uneceFields: JSON.stringify(uneceFields),
     steps: JSON.stringify(steps),
     stations: JSON.stringify(stations),
     choices: JSON.stringify(choices),

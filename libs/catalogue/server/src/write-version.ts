@@ -1,9 +1,16 @@
-import { faultsOfVersion, specificationStates, stageOf, type VersionContent } from '@seamwright/catalogue/domain';
-import { sayRefusal } from '@seamwright/shared/contracts';
+import {
+  faultsOfVersion,
+  specificationStates,
+  stageOf,
+  type Species,
+  type VersionContent,
+} from '@seamwright/catalogue/domain';
 import { notFound, personOf, ProblemError, type Caller, type Tx } from '@seamwright/shared/server';
 import { newId, RefusalError, unwrap } from '@seamwright/shared/util';
 import { cutNodes } from './cut-nodes.repository';
 import { versionsByIds } from './specifications.repository';
+import { saidFaults } from './unece.presenter';
+import { uneceFieldValues } from './unece-values.repository';
 import { contentColumns } from './version-row';
 
 /** Who acts on a version; only a person may. Refuses with `not-allowed`. */
@@ -34,15 +41,15 @@ export async function createVersion(
   { caller, specificationId, content }: { caller: Caller; specificationId: string; content: VersionContent },
 ): Promise<string> {
   const authoredBy = actingPerson(caller);
-  refuseFaults(content);
   const specification = await tx
     .selectFrom('specifications')
-    .select('id')
+    .select('species')
     .where('id', '=', specificationId)
     // Two people who write the next version at once get two numbers.
     .forUpdate()
     .executeTakeFirst();
   if (!specification) throw notFound();
+  await refuseFaults(tx, content, specification.species as Species);
   const { last } = await tx
     .selectFrom('specificationVersions')
     .select((eb) => eb.fn.max('version').as('last'))
@@ -68,7 +75,7 @@ export async function submitVersion(tx: Tx, versionId: string): Promise<void> {
   const version = (await versionsByIds(tx, [versionId])).get(versionId);
   if (!version) throw notFound();
   unwrap(specificationStates.next(stageOf(version), 'submit'));
-  refuseFaults(version);
+  await refuseFaults(tx, version, version.species);
   await tx
     .updateTable('specificationVersions')
     .set((eb) => ({ state: 'in-review', rowVersion: eb('rowVersion', '+', 1) }))
@@ -77,9 +84,8 @@ export async function submitVersion(tx: Tx, versionId: string): Promise<void> {
     .executeTakeFirstOrThrow();
 }
 
-function refuseFaults(content: VersionContent): void {
-  const faults = faultsOfVersion(content);
+async function refuseFaults(tx: Tx, content: VersionContent, species: Species): Promise<void> {
+  const faults = faultsOfVersion(content, { species, values: await uneceFieldValues(tx) });
   if (faults.length === 0) return;
-  const errors = faults.map((fault) => ({ pointer: fault.pointer ?? '', message: sayRefusal(fault) }));
-  throw new ProblemError(422, { code: 'invalid', params: {} }, errors);
+  throw new ProblemError(422, { code: 'invalid', params: {} }, saidFaults(faults));
 }

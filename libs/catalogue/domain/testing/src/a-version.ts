@@ -10,6 +10,7 @@ export function aContent(stated: Partial<VersionContent> = {}): VersionContent {
     uneceItem: '2140',
     uneceItemSeen: true,
     fatCode: null,
+    uneceFields: {},
     cuttingLines: 'Between the last rib and the last lumbar joint.',
     boneState: 'boneless',
     fatCoverMm: 6,

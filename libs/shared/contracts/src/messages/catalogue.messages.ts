@@ -25,4 +25,23 @@ export const catalogueMessages = {
   'version-default-unknown': (p) => $localize`The usual value of ${p['choice']}:choice: is not among its values.`,
   'version-rule-unknown': (p) => $localize`A rule speaks of ${p['value']}:value:, which can't be chosen here.`,
   'version-defaults-impossible': (p) => $localize`The usual values can't stand together: ${p['reason']}:reason:`,
+  'search-range': () => $localize`The range ends before it begins.`,
+  'search-price-customer': () => $localize`Prices are a customer's own: only a buyer can search by them.`,
+  'synonym-empty': () => $localize`Type a name with letters.`,
+  'synonym-taken': () => $localize`This name stands there already for that region.`,
+  'synonym-of-nothing': () => $localize`There is no such cut or specification to name.`,
+  'unece-code-length': (p) =>
+    $localize`A UNECE code has ${p['wanted']}:wanted: digits; this has ${p['length']}:length: characters.`,
+  'unece-field-digits': (p) =>
+    $localize`Field ${p['number']}:number: takes digits only, ${p['digits']}:digits: of them.`,
+  'unece-field-unused': (p) => $localize`Field ${p['number']}:number: is not used: it must be 00.`,
+  'unece-value-unlisted': (p) =>
+    $localize`${p['value']}:value: is not in the list of field ${p['number']}:number:. An administrator can complete the list.`,
+  'unece-field-unknown': (p) => $localize`${p['field']}:field: is not a field of the UNECE code that can be chosen.`,
+  'unece-fat-differs': (p) =>
+    $localize`The fat thickness is stated as ${p['fatCode']}:fatCode: elsewhere on this version: they must agree.`,
+  'unece-item-missing': () => $localize`Without a UNECE item number there is no code.`,
+  'unece-species-unlisted': () => $localize`The list of field 1 has no number for this species yet.`,
+  'unece-value-taken': () => $localize`The list of this field has that value already.`,
+  'unece-species-taken': () => $localize`Another value of field 1 stands for this species already.`,
 } satisfies MessageTable;
