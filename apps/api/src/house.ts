@@ -9,6 +9,7 @@ import {
   type AccountsParts,
 } from '@seamwright/accounts/server';
 import { catalogueImplementations, schemeImplementations, yieldImplementations } from '@seamwright/catalogue/server';
+import { catalogueImplementations, searchImplementations } from '@seamwright/catalogue/server';
 import { identityImplementations, tidyIdentity, type IdentityParts } from '@seamwright/identity/server';
 import {
   countOpenOrderLines,
@@ -18,6 +19,7 @@ import {
 } from '@seamwright/ordering/server';
 import { cuttingDayPort, plantImplementations, plantSubscribers } from '@seamwright/plant/server';
 import { countPriceLines, pricingImplementations, pricingPeriodic } from '@seamwright/pricing/server';
+import { pricePort, pricingImplementations, pricingPeriodic } from '@seamwright/pricing/server';
 import {
   mailSubscriber,
   smtpMailer,
@@ -30,7 +32,7 @@ import {
   type PeriodicJob,
   type Subscriber,
 } from '@seamwright/shared/server';
-import { stockImplementations } from '@seamwright/stock/server';
+import { stockImplementations, stockPort } from '@seamwright/stock/server';
 
 /** Everything that the storeys bring, put together in one place; no business rule lives here. */
 export interface House {
@@ -98,6 +100,7 @@ export function buildHouse({ config, database, clock, log }: HouseParts): House 
       ...catalogueImplementations,
       ...schemeImplementations,
       ...yieldImplementations({ timeZone, readers: { countPriceLines, countOpenOrderLines } }),
+      ...searchImplementations({ stock: stockPort, prices: pricePort, timeZone }),
       ...pricingImplementations({ timeZone, publicOrigin }),
       ...stockImplementations({ timeZone }),
       ...orderingImplementations(ordering),

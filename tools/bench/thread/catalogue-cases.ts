@@ -35,9 +35,11 @@ export async function catalogueCases({ api, plain, as }: Stage, days: ThreadDays
           await readVersionsByCode(plain, found);
           await readCutTree(plain);
           await plain.query(
-            `select species, primal_node_id, bone_state, count(*) from specification_search
-             where words ilike '%' || $1 || '%' or $1 <% words
-             group by grouping sets ((species), (primal_node_id), (bone_state))`,
+            `select species, primal_node_id, cut_node_id, bone_states, fat_bands, portion_bands, ageing_kind, pack_types,
+               count(*)
+             from specification_search where words ilike '%' || $1 || '%' or $1 <% words
+             group by grouping sets ((species), (primal_node_id), (cut_node_id), (bone_states), (fat_bands),
+               (portion_bands), (ageing_kind), (pack_types))`,
             [WORD],
           );
         }),

@@ -1,3 +1,4 @@
+export { pricePerKg } from './price-per-kg';
 export { HOUSE_CURRENCY } from './house-currency';
 export { plateCost, portionToBuy, type Plate, type PlateCost } from './plate-cost';
 export { lineAmounts, type LineAmounts, type PricedWeights } from './line-amounts';

@@ -1,9 +1,9 @@
 import { checkPrices } from '@seamwright/pricing/contracts';
-import { pricingImplementations } from './index';
+import { pricePort, pricingImplementations } from './index';
 import { addTestMarket, type TestMarket } from '@seamwright/pricing/server/testing';
 import { inTransaction, system, type Caller } from '@seamwright/shared/server';
 import { openTestHouse, type TestHouse } from '@seamwright/shared/server/testing';
-import { newId } from '@seamwright/shared/util';
+import { newId, type PlantDate } from '@seamwright/shared/util';
 
 describe('price check', () => {
   let house: TestHouse;
@@ -152,5 +152,25 @@ describe('price check', () => {
     expect(body.lines).toEqual([
       { ok: false, code: 'specification-not-offered', message: expect.stringContaining('not offered') },
     ]);
+  });
+
+  it('gives the catalogue a customer’s prices per kg, of what is not on request', async () => {
+    const { hotelId, pubId, hotelBuyer, pubBuyer, shoulder, steak } = market;
+    const offers = [shoulder, steak].map(({ specificationId }) => ({
+      specificationId,
+      usualChoiceKey: '',
+      usualPriceChangeMinorPerKg: 0,
+      pieceGrams: 280,
+      piecesPerCase: 12,
+    }));
+    const prices = async (caller: Caller, customerId: string, day: string) => {
+      const found = await inTransaction(house.database, caller, (tx) =>
+        pricePort.pricesPerKg(tx, customerId, day as PlantDate, offers),
+      );
+      return [shoulder, steak].map(({ specificationId }) => found.get(specificationId));
+    };
+    expect(await prices(hotelBuyer, hotelId, deliveryDay)).toEqual([950, 1_850]);
+    expect(await prices(pubBuyer, pubId, deliveryDay)).toEqual([1_000, 2_000]);
+    expect(await prices(pubBuyer, pubId, '2025-12-31')).toEqual([undefined, undefined]);
   });
 });

@@ -7,6 +7,7 @@ import { quoteImplementations, type QuoteParts } from './quotes.router';
 
 export { countPriceLines } from './count-price-lines';
 export { addPriceList, type NewPriceLine, type NewPriceList } from './price-lists.repository';
+export { pricePort } from './price-port';
 export { priceFor, type PriceRequest } from './price-for';
 
 /** The endpoints of this storey. */

@@ -5,21 +5,14 @@ import { notFound, stale, type Tx } from '@seamwright/shared/server';
 import { grams, type PlantDate } from '@seamwright/shared/util';
 import type { Lot, LotOrigin, LotState } from '@seamwright/stock/domain';
 
-/** Lots with the name of their primal and what packing has left of them. */
+/** Lots with the name of their primal and what packing, for whichever customer, has left of them. */
 const lotsOnHand = (tx: Tx) =>
   tx
     .selectFrom('lots')
     .innerJoin('cutNodes', 'cutNodes.id', 'lots.nodeId')
     .selectAll('lots')
     .select('cutNodes.name as nodeName')
-    .select((e) =>
-      e
-        .selectFrom('packs')
-        .whereRef('packs.lotId', '=', 'lots.id')
-        .where('packs.voidedAt', 'is', null)
-        .select(sql<number>`coalesce(sum(packs.input_grams), 0)::bigint`.as('used'))
-        .as('usedGrams'),
-    );
+    .select(sql<number>`grams_used_of_lot(lots.id)`.as('usedGrams'));
 
 type LotRow = Awaited<ReturnType<ReturnType<typeof lotsOnHand>['executeTakeFirstOrThrow']>>;
 
@@ -36,7 +29,7 @@ const lotOf = (row: LotRow): Lot => ({
   receivedGrams: grams(row.receivedGrams),
   receivedPieces: row.receivedPieces,
   // Yields are expected values: a lot that cuts better than expected never shows less than nothing.
-  remainingGrams: grams(Math.max(0, row.receivedGrams - (row.usedGrams ?? 0))),
+  remainingGrams: grams(Math.max(0, row.receivedGrams - row.usedGrams)),
   state: row.state as LotState,
   holdReason: row.holdReason,
   origin: row.origin as LotOrigin,
@@ -84,6 +77,11 @@ export async function releasedLotsOf(tx: Tx, nodeIds: readonly string[]): Promis
     .where('lots.state', '=', 'released')
     .execute();
   return rows.map(lotOf);
+}
+
+/** Every released lot. */
+export async function releasedLots(tx: Tx): Promise<Lot[]> {
+  return (await lotsOnHand(tx).where('lots.state', '=', 'released').execute()).map(lotOf);
 }
 
 export type NewLot = Omit<Lot, 'rowVersion' | 'nodeName' | 'remainingGrams' | 'state' | 'holdReason'>;

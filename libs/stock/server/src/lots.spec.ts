@@ -3,7 +3,7 @@ import { inTransaction, type Caller } from '@seamwright/shared/server';
 import { openTestHouse, type TestHouse, TEST_NOW } from '@seamwright/shared/server/testing';
 import { newId, type PlantDate } from '@seamwright/shared/util';
 import { getLot, holdLot, listLotNodes, listLots, receiveLot, releaseLot } from '@seamwright/stock/contracts';
-import { lotsOf, stockImplementations } from './index';
+import { lotsOf, stockImplementations, stockPort } from './index';
 
 let house: TestHouse;
 let tree: TestTree;
@@ -134,6 +134,13 @@ describe('the list of lots', () => {
     );
     expect(fit.map(({ code }) => code)).toEqual(['L-200', 'L-201', 'L-202']);
     expect(await inTransaction(house.database, technical, (tx) => lotsOf(tx, [], day))).toEqual([]);
+  });
+
+  it('tells a buyer what there is on a day, without a lot', async () => {
+    const inStock = (day: string) =>
+      inTransaction(house.database, buyer, (tx) => stockPort.nodesInStock(tx, day as PlantDate));
+    expect(await inStock('2026-12-03')).toEqual([tree.shoulderId]);
+    expect(await inStock('2026-12-10')).toEqual([]);
   });
 });
 

@@ -1,6 +1,22 @@
 import * as catalogue from '@seamwright/catalogue/contracts';
 import { ofHouse, type Row } from '../row';
 import { aSpecification } from '../testing/trade';
+import type { World } from '../testing/world';
+
+const aSynonym = (world: World) => ({
+  nodeId: world.tree.striploinId,
+  specificationId: null,
+  term: `Sirloin ${world.next()}`,
+  region: 'England',
+});
+
+const aUneceValue = (world: World) => ({
+  field: 'item' as const,
+  value: String(7_000 + world.next()),
+  meaning: 'Head meat',
+  species: null,
+  source: null,
+});
 
 export const catalogueRows: readonly Row[] = [
   ofHouse(catalogue.searchSpecifications, () => ({ query: { q: 'steak' } })),
@@ -13,4 +29,19 @@ export const catalogueRows: readonly Row[] = [
     return { params, body: { reason: 'No longer cut' }, ifMatch: rowVersion };
   }),
   ofHouse(catalogue.getCutTree, () => ({})),
+  ofHouse(catalogue.listSynonyms, () => ({ query: { q: 'sirloin' } })),
+  ofHouse(catalogue.addSynonym, (world) => ({ body: aSynonym(world) })),
+  ofHouse(catalogue.removeSynonym, async (world) => {
+    const { id } = await world.deed(world.staff.technical, catalogue.addSynonym, { body: aSynonym(world) });
+    return { params: { id } };
+  }),
+  ofHouse(catalogue.listUneceValues, () => ({ query: { field: 'packing' as const } })),
+  ofHouse(catalogue.addUneceValue, (world) => ({ body: aUneceValue(world) })),
+  ofHouse(catalogue.correctUneceValue, async (world) => {
+    const { id, rowVersion } = await world.deed(world.staff.admin, catalogue.addUneceValue, {
+      body: aUneceValue(world),
+    });
+    return { params: { id }, body: { meaning: 'Cheek', source: 'Standard, chapter 5' }, ifMatch: rowVersion };
+  }),
+  ofHouse(catalogue.readUnece, () => ({ query: { code: '40499000110000030050' } })),
 ];
