@@ -11,7 +11,18 @@ import type { FoundPage } from './catalogue-list.state';
 const page = (codes: string[], nextCursor: string | null = null): FoundPage => ({
   items: codes.map((code) => ({ code }) as FoundPage['items'][number]),
   nextCursor,
-  counts: { species: [], primals: [], boneStates: [] },
+  counts: {
+    species: [],
+    primals: [],
+    nodes: [],
+    boneStates: [],
+    fatBands: [],
+    portionBands: [],
+    ageingKinds: [],
+    packTypes: [],
+    inStock: null,
+    prices: null,
+  },
 });
 
 describe('the catalogue list', () => {

@@ -15,6 +15,8 @@ const record: StaffSpecification = {
   rowVersion: 3,
   state: 'approved',
   standing: 'current',
+  uneceFields: {},
+  unece: { reading: null, faults: [] },
   sourceName: 'Striploin',
   tareGrams: 18,
   yieldPpm: 780_000,
