@@ -686,6 +686,10 @@ export interface RefreshTokens {
   tokenHash: string;
 }
 
+export interface SearchTerms {
+  term: string;
+}
+
 export interface SignInFailures {
   emailHash: string;
   failedAt: Timestamp;
@@ -758,7 +762,6 @@ export interface SpecificationSearch {
   usualChoiceKey: string;
   usualPriceChangeMinor: number;
   versionId: string;
-  words: Generated<string>;
 }
 
 export interface SpecificationStandings {
@@ -897,6 +900,7 @@ export interface DB {
   quoteLines: QuoteLines;
   quotes: Quotes;
   refreshTokens: RefreshTokens;
+  searchTerms: SearchTerms;
   signInFailures: SignInFailures;
   signInSessions: SignInSessions;
   sites: Sites;

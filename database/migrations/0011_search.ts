@@ -61,7 +61,7 @@ const fillFromVersions = `
     array(select o.pack_type union select each ->> 'packType' from jsonb_array_elements(o.changes) as each
       where each ? 'packType' order by 1),
     o.ageing_kind, o.ageing_min_days, p.names, '',
-    o.summary || ' ' || o.bone_state || ' ' || o.finish || ' ' || o.piece_kind
+    concat_ws(' ', o.summary, o.bone_state, o.finish, o.piece_kind, o.unece_item)
   from offered o join paths p on p.cut_id = o.cut_node_id;
 `;
 
@@ -120,9 +120,6 @@ export const search: Migration = {
       place text not null,
       also text not null,
       rest text not null,
-      words text not null generated always as (
-        code || ' ' || name || ' ' || also || ' ' || place || ' ' || rest
-      ) stored,
       lexemes tsvector not null generated always as (
         setweight(array_to_tsvector(array[lower(code)]), 'A')
         || ${weighed('name', 'A')} || ${weighed('also', 'B')} || ${weighed('place', 'C')} || ${weighed('rest', 'D')}
@@ -132,8 +129,25 @@ export const search: Migration = {
     create index specification_search_name on specification_search (name, code);
     create index specification_search_weight on specification_search (piece_grams, code);
     create index specification_search_lexemes on specification_search using gin (lexemes);
-    create index specification_search_words on specification_search using gin (words gin_trgm_ops);
     create index specification_search_nodes on specification_search using gin (node_ids);
+
+    -- Every word that finds something, once: a part of a word, or one that is mistyped, is looked up here, where the words
+    -- are few, and the specifications by whole words only.
+    create table search_terms (
+      term text primary key
+    );
+    create index search_terms_like on search_terms using gin (term gin_trgm_ops);
+    create function keep_search_terms() returns trigger language plpgsql as $$
+    begin
+      insert into search_terms
+        select distinct unnest(tsvector_to_array(to_tsvector('simple', concat_ws(' ', name, also, place, rest))))
+        from changed order by 1 on conflict do nothing;
+      return null;
+    end $$;
+    create trigger specification_search_added after insert on specification_search
+      referencing new table as changed for each statement execute function keep_search_terms();
+    create trigger specification_search_changed after update on specification_search
+      referencing new table as changed for each statement execute function keep_search_terms();
     ${fillFromVersions}
 
     -- How much of a lot packing has used, whoever asks: a sum over all customers that tells nothing of any of them. The

@@ -1,12 +1,13 @@
 // Texts are marked with $localize: it has to be there before anything that says something.
 import '@angular/localize/init';
 import type { Bench } from './bench';
+import { catalogueBench } from './catalogue/catalogue.bench';
 import { readWish } from './options';
 import { reportLine, table } from './report';
 import { runPairs } from './run-pairs';
 import { threadBench } from './thread/thread.bench';
 
-const BENCHES: readonly Bench[] = [threadBench];
+const BENCHES: readonly Bench[] = [threadBench, catalogueBench];
 const WARM_UPS = 3;
 
 /** Answers go to the standard output, what is going on to the other one. */

@@ -1,4 +1,4 @@
-import type { BenchCase } from './bench';
+import type { AgainstFloor, AgainstLimit } from './bench';
 import type { Measured } from './run-pairs';
 
 /** One line of the answer, as `--json` prints it. */
@@ -7,7 +7,7 @@ export interface ReportLine {
   readonly case: string;
   readonly size: string;
   readonly unit: 'ms';
-  /** Medians. */
+  /** What the ratio is of: medians, or what all but one turn in twenty stayed under. */
   readonly ours: number;
   readonly floor: number;
   readonly ratio: number;
@@ -19,19 +19,21 @@ export interface ReportLine {
 
 const rounded = (value: number, places: number): number => Math.round(value * 10 ** places) / 10 ** places;
 
+type Reported = Pick<AgainstFloor, 'name' | 'size' | 'target' | 'by'> | Pick<AgainstLimit, 'name' | 'size' | 'limitMs'>;
+
 /** What is reported of a measured case. The target is held against the ratio as it was measured, not as it is shown. */
-export function reportLine(
-  bench: string,
-  { name, size, target }: Pick<BenchCase, 'name' | 'size' | 'target'>,
-  { ours, floor, ratio }: Measured,
-): ReportLine {
+export function reportLine(bench: string, reported: Reported, { ours, floor, ratio }: Measured): ReportLine {
+  const { name, size } = reported;
+  const p95 = 'limitMs' in reported || reported.by === 'p95';
+  const target = 'limitMs' in reported ? 1 : reported.target;
+  const shown = p95 ? 'p95' : 'median';
   return {
     bench,
     case: name,
     size,
     unit: 'ms',
-    ours: rounded(ours.median, 3),
-    floor: rounded(floor.median, 3),
+    ours: rounded(ours[shown], 3),
+    floor: rounded(floor[shown], 3),
     ratio: rounded(ratio, 2),
     better: 'smaller',
     target,

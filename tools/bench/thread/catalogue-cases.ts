@@ -27,9 +27,10 @@ export async function catalogueCases({ api, plain, as }: Stage, days: ThreadDays
       ours: () => api.call(token(), searchSpecifications, { query: { q: WORD } }),
       floor: () =>
         plain.inTransaction(async () => {
+          await plain.query(`select term from search_terms where term like '%' || $1 || '%'`, [WORD]);
           await plain.query(
-            `select specification_id, code, word_similarity($1, name) as score from specification_search
-             where words ilike '%' || $1 || '%' or $1 <% words order by score desc, code limit 51`,
+            `select specification_id, code, ts_rank(lexemes, to_tsquery('simple', $1)) as score
+             from specification_search where lexemes @@ to_tsquery('simple', $1) order by score desc, code limit 51`,
             [WORD],
           );
           await readVersionsByCode(plain, found);
@@ -37,7 +38,7 @@ export async function catalogueCases({ api, plain, as }: Stage, days: ThreadDays
           await plain.query(
             `select species, primal_node_id, cut_node_id, bone_states, fat_bands, portion_bands, ageing_kind, pack_types,
                count(*)
-             from specification_search where words ilike '%' || $1 || '%' or $1 <% words
+             from specification_search where lexemes @@ to_tsquery('simple', $1)
              group by grouping sets ((species), (primal_node_id), (cut_node_id), (bone_states), (fat_bands),
                (portion_bands), (ageing_kind), (pack_types))`,
             [WORD],

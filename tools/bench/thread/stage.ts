@@ -139,7 +139,7 @@ interface Addresses {
 }
 
 /** As a production would be set up, with the default cost of passwords; only the rate limit is out of the way. */
-const configFor = ({ appUrl, workerUrl, stripePort, smtpPort }: Addresses): Config =>
+export const configFor = ({ appUrl, workerUrl, stripePort, smtpPort }: Addresses): Config =>
   readConfig({
     SEAMWRIGHT_MODE: 'test',
     APP_DATABASE_URL: appUrl,

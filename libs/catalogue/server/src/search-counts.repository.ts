@@ -1,4 +1,4 @@
-import { sql } from 'kysely';
+import { sql, type RawBuilder } from 'kysely';
 import type { Tx } from '@seamwright/shared/server';
 import { activeFilters, isStocked, type FilterName, type SearchFilters } from './search-filters';
 import { fits, type SearchWord } from './search-words';
@@ -30,9 +30,15 @@ interface CountRow {
   readonly count: number;
 }
 
+/** Everything that filters look at, but the price, which is a specification's own. */
+const FACETS = sql.raw(
+  `species, primal_node_id, cut_node_id, node_ids, source_node_id, bone_states, fat_bands, portions, portion_bands,
+   ageing_kind, ageing_min_days, pack_types`,
+);
+
 /**
- * Counts in one pass: a row that misses one filter only counts for that filter's other values, a row that misses none
- * counts for all, and any other for nothing.
+ * Counts in one pass over what fits the words: first how many there are of each kind, then which filters a kind misses. One
+ * that misses a single filter counts for that filter's other values, one that misses none for all, any other for nothing.
  */
 export async function countByFilter(
   tx: Tx,
@@ -40,35 +46,30 @@ export async function countByFilter(
 ): Promise<FilterCounts> {
   const active = activeFilters(filters);
   const bits = new Map(active.map(({ name }, at) => [name, 1 << at]));
-  const fails =
-    active.length === 0
-      ? sql`0`
-      : sql.join(
-          active.map(({ condition }, at) => sql`case when ${condition} then 0 else ${sql.lit(1 << at)} end`),
-          sql` + `,
-        );
-  const columns = COUNTED.map(([, column]) => sql.raw(column));
+  const price = active.find(({ name }) => name === 'price')?.condition ?? sql`true`;
+  const misses = active.map(({ name, condition }, at) => {
+    const holds = name === 'price' ? sql`priced` : condition;
+    return sql`case when ${holds} then 0 else ${sql.lit(1 << at)} end`;
+  });
+  const fails = misses.length === 0 ? sql`0` : sql.join(misses, sql` + `);
   const sets = COUNTED.map(([, column]) => sql`(fails, ${sql.raw(column)})`);
   // The bits of grouping() say which columns a row is not of.
-  const value = sql.join(
-    COUNTED.map(
-      ([, column], at) =>
-        sql`when ${sql.lit(all - (1 << (COUNTED.length - 1 - at)))} then to_jsonb(${sql.raw(column)})`,
-    ),
-    sql` `,
-  );
-  const at = sql.join(
-    COUNTED.map((_, place) => sql`when ${sql.lit(all - (1 << (COUNTED.length - 1 - place)))} then ${sql.lit(place)}`),
-    sql` `,
-  );
-  const grouped = sql`grouping(${sql.join(columns)})`;
+  const ofColumn = (place: number) => sql.lit(all - (1 << (COUNTED.length - 1 - place)));
+  const whens = (then: (place: number, column: string) => RawBuilder<unknown>) =>
+    sql.join(
+      COUNTED.map(([, column], place) => sql`when ${ofColumn(place)} then ${then(place, column)}`),
+      sql` `,
+    );
+  const grouped = sql`grouping(${sql.join(COUNTED.map(([, column]) => sql.raw(column)))})`;
   const { rows } = await sql<CountRow>`
-    with marked as (
-      select species, primal_node_id, cut_node_id, bone_states, fat_bands, portion_bands, ageing_kind, pack_types,
-        ${filters.stocked ? isStocked(filters.stocked) : sql`false`} as stocked, ${fails} as fails
-      from specification_search where ${fits(words)}
+    with kinds as materialized (
+      select ${FACETS}, ${price} as priced, count(*) as many from specification_search where ${fits(words)}
+      group by ${FACETS}, priced
+    ), marked as materialized (
+      select *, ${filters.stocked ? isStocked(filters.stocked) : sql`false`} as stocked, ${fails} as fails from kinds
     )
-    select fails, case ${grouped} ${at} end as at, case ${grouped} ${value} end as value, count(*)::int as count
+    select fails, case ${grouped} ${whens((place) => sql.lit(place))} end as at,
+      case ${grouped} ${whens((_, column) => sql`to_jsonb(${sql.raw(column)})`)} end as value, sum(many)::int as count
     from marked where fails in (${sql.join([0, ...bits.values()].map((bit) => sql.lit(bit)))})
     group by grouping sets (${sql.join(sets)})
   `.execute(tx);

@@ -49,9 +49,16 @@ export async function makeUnfindable(tx: Tx, specificationId: string): Promise<v
 }
 
 /** What a person may look for beside name, place and other names; the name again where it is written with accents. */
-function restOf({ name, summary, boneState, finish, pieceKind }: SpecificationVersion): string {
+function restOf({ name, summary, boneState, finish, pieceKind, uneceItem }: SpecificationVersion): string {
   const plain = plainWords(name);
-  return [summary, boneState, finish, pieceKind, ...(plain === name.toLowerCase() ? [] : [plain])].join(' ');
+  return [
+    summary,
+    boneState,
+    finish,
+    pieceKind,
+    uneceItem ?? '',
+    ...(plain === name.toLowerCase() ? [] : [plain]),
+  ].join(' ');
 }
 
 /** Brings what is found by other names up to date: of one specification, or of all under a node of the cut tree. */

@@ -2,47 +2,99 @@ import { sql, type RawBuilder } from 'kysely';
 import { plainWords } from '@seamwright/catalogue/domain';
 import type { Tx } from '@seamwright/shared/server';
 
-/** A word of what was asked. `mistyped` where no text has it, so that what is like it is looked for. */
+/** A word of what was asked, and the catalogue's own words that it may stand for. */
 export interface SearchWord {
+  /** As typed, or the catalogue's word that is most like it when that stands nowhere. */
   readonly word: string;
-  readonly mistyped: boolean;
+  /** Other words of the catalogue: that it is a part of, or that are like it. */
+  readonly others: readonly string[];
 }
 
 type Condition = RawBuilder<unknown>;
 
 const MOST_WORDS = 8;
+/** How many of the catalogue's words one word may stand for. */
+const MOST_OTHERS = 40;
+const MOST_ALIKE = 4;
 /** How alike a word must be to count as mistyped; "shuolder" is like "shoulder" by 0.385, two letters changed over. */
 const ALIKE = '0.38';
+/** Shorter ones stand inside of too many words; they are looked for at the beginning only. */
+const PART_LETTERS = 3;
 
 const pattern = (text: string): string => text.replace(/[\\%_]/g, '\\$&');
 const inside = (word: string): string => `%${pattern(word)}%`;
+const quoted = (lexeme: string): string => `'${lexeme.replace(/\\/g, '\\\\').replace(/'/g, "''")}'`;
 
-/** The word as the beginning of a lexeme, whatever signs are in it, or its stem. */
-const lexemesLike = (word: string): Condition =>
-  sql`(${`'${word.replace(/\\/g, '\\\\').replace(/'/g, "''")}':*`}::tsquery || plainto_tsquery('english', ${word}))`;
+/** A code may be typed without its hyphen. */
+const asCode = (word: string): string => word.replace(/^([a-z]{2})(\d{1,3})$/, '$1-$2');
 
-/** Stands in the text: as a word, as the beginning or stem of one, or inside of one. */
-const standsThere = (word: string): Condition => sql`(lexemes @@ ${lexemesLike(word)} or words ilike ${inside(word)})`;
-
-/** Splits what was asked and finds out which words stand nowhere in the catalogue. */
-export async function searchWords(tx: Tx, q = ''): Promise<SearchWord[]> {
-  const words = plainWords(q).split(' ').filter(Boolean).slice(0, MOST_WORDS);
-  if (words.length === 0) return [];
-  const known = words.map((word) => sql`exists (select from specification_search where ${standsThere(word)})`);
-  const { rows } = await sql<{ known: boolean[] }>`select array[${sql.join(known)}] as known`.execute(tx);
-  const found = words.map((word, at) => ({ word, mistyped: !rows[0]?.known[at] }));
-  if (found.some(({ mistyped }) => mistyped)) {
-    // The operator that the trigram index serves reads its limit from a setting, kept to this transaction.
-    await sql`select set_config('pg_trgm.word_similarity_threshold', ${ALIKE}, true)`.execute(tx);
-  }
-  return found;
+interface KnownTerm {
+  readonly at: number;
+  readonly term: string;
+  readonly alike: boolean;
 }
 
-/** Every word stands in the text, or nearly where it is mistyped. */
+/**
+ * Splits what was asked and looks each word up among the words of the catalogue: those it is a part of, else those that it
+ * is like. A word with digits is a code or a number, and taken as it is.
+ */
+export async function searchWords(tx: Tx, q = ''): Promise<SearchWord[]> {
+  const words = plainWords(q).split(' ').filter(Boolean).slice(0, MOST_WORDS).map(asCode);
+  if (words.length === 0) return [];
+  const looked = words.map((word, at) => ({ word, at })).filter(({ word }) => !/\d/.test(word));
+  const terms = await termsOf(tx, looked);
+  return words.map((word, at) => {
+    const own = terms.filter((each) => each.at === at).map(({ term, alike }) => ({ term, alike }));
+    const [best] = own;
+    const others = own.map(({ term }) => term);
+    return best?.alike ? { word: best.term, others: others.slice(1, MOST_ALIKE) } : { word, others };
+  });
+}
+
+/** Words of the catalogue that contain a word; where there is none, the most alike first. */
+async function termsOf(tx: Tx, looked: readonly { word: string; at: number }[]): Promise<KnownTerm[]> {
+  if (looked.length === 0) return [];
+  const parts = await lookUp(tx, looked, ({ word, at }) => {
+    const like = word.length < PART_LETTERS ? `${pattern(word)}%` : inside(word);
+    return sql`(select ${at}::int as at, term, false as alike from search_terms where term like ${like}
+      order by length(term), term limit ${MOST_OTHERS})`;
+  });
+  const unknown = looked.filter(({ at }) => !parts.some((each) => each.at === at));
+  if (unknown.length === 0) return parts;
+  // The operator that the trigram index serves reads its limit from a setting, kept to this transaction.
+  await sql`select set_config('pg_trgm.similarity_threshold', ${ALIKE}, true)`.execute(tx);
+  const alike = await lookUp(
+    tx,
+    unknown,
+    ({ word, at }) =>
+      sql`(select ${at}::int as at, term, true as alike from search_terms where term % ${word}
+        order by similarity(term, ${word}) desc, term limit ${MOST_ALIKE})`,
+  );
+  return [...parts, ...alike];
+}
+
+async function lookUp<Word>(
+  tx: Tx,
+  words: readonly Word[],
+  lookedUp: (word: Word) => RawBuilder<unknown>,
+): Promise<KnownTerm[]> {
+  const { rows } = await sql<KnownTerm>`${sql.join(words.map(lookedUp), sql` union all `)}`.execute(tx);
+  return rows;
+}
+
+/** The word as the beginning of a word, or its stem. */
+const asTyped = (word: string): Condition =>
+  sql`(${`${quoted(word)}:*`}::tsquery || plainto_tsquery('english', ${word}))`;
+
+/** The word or any that it may stand for. */
+const anyOf = ({ word, others }: SearchWord): Condition =>
+  others.length === 0 ? asTyped(word) : sql`(${asTyped(word)} || ${others.map(quoted).join(' | ')}::tsquery)`;
+
+/** Every word stands in the text, or one that it may stand for. */
 export function fits(words: readonly SearchWord[]): Condition {
   if (words.length === 0) return sql`true`;
   return sql.join(
-    words.map(({ word, mistyped }) => (mistyped ? sql`${word}::text <% words` : standsThere(word))),
+    words.map((word) => sql`lexemes @@ ${anyOf(word)}`),
     sql` and `,
   );
 }
@@ -53,14 +105,12 @@ export function fits(words: readonly SearchWord[]): Condition {
  */
 export function scoreOf(words: readonly SearchWord[]): RawBuilder<number> {
   if (words.length === 0) return sql<number>`0`;
-  const each = words.map(({ word, mistyped }) =>
-    mistyped
-      ? sql`(round(word_similarity(${word}, name) * 1000) + round(word_similarity(${word}, words) * 300))::int`
-      : sql`(
-          case when code ilike ${`${pattern(word)}%`} then 4000 when name ilike ${inside(word)} then 2000
-            when also ilike ${inside(word)} then 1000 else 0 end
-          + round(ts_rank('{0.1, 0.2, 0.6, 1}', lexemes, ${lexemesLike(word)}) * 1000)::int
-        )`,
+  const each = words.map(
+    ({ word }) => sql`(
+      case when code ilike ${`${pattern(word)}%`} then 4000 when name ilike ${inside(word)} then 2000
+        when also ilike ${inside(word)} then 1000 else 0 end
+      + round(ts_rank('{0.1, 0.2, 0.6, 1}', lexemes, ${asTyped(word)}) * 1000)::int
+    )`,
   );
   return sql<number>`(${sql.join(each, sql` + `)})`;
 }
