@@ -78,7 +78,7 @@ async function lookUp<Word>(
   words: readonly Word[],
   lookedUp: (word: Word) => RawBuilder<unknown>,
 ): Promise<KnownTerm[]> {
-  const { rows } = await sql<KnownTerm>`${sql.join(words.map(lookedUp), sql` union all `)}`.execute(tx);
+  const { rows } = await sql<KnownTerm>`select * from (${sql.join(words.map(lookedUp), sql` union all `)}) as looked`.execute(tx);
   return rows;
 }
 

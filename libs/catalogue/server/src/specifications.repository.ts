@@ -13,7 +13,10 @@ const versions = (tx: Tx) =>
   tx
     .selectFrom('specificationVersions as v')
     .innerJoin('specifications as s', 's.id', 'v.specificationId')
-    .leftJoin('specificationStandings as st', 'st.versionId', 'v.id')
+    // By both: the index of what is in force knows the specification only.
+    .leftJoin('specificationStandings as st', (join) =>
+      join.onRef('st.versionId', '=', 'v.id').onRef('st.specificationId', '=', 'v.specificationId'),
+    )
     .selectAll('v')
     .select(['s.code', 's.species', 's.cutNodeId', 'st.standing']);
 
