@@ -31,6 +31,23 @@ it('leaves the warm-up out and divides the medians', async () => {
   expect(measured.ratio).toBe(3);
 });
 
+it('divides what all but one turn in twenty stayed under, where a case says so', async () => {
+  const { clock, works } = standing();
+  const once = (turn: number) => (turn === 19 ? 60 : 10);
+  const measured = await runPairs(
+    { ours: works('o', once), floor: works('f', () => 5), by: 'p95' },
+    { warmUps: 0, turns: 20, clock },
+  );
+  expect(measured.ratio).toBeCloseTo(12.5 / 5, 10);
+});
+
+it('times a case with a limit alone, and holds its p95 against that', async () => {
+  const { clock, order, works } = standing();
+  const measured = await runPairs({ ours: works('o', () => 1), limitMs: 2 }, { warmUps: 1, turns: 2, clock });
+  expect(order).toEqual(['o0', 'o1', 'o2']);
+  expect(measured).toEqual({ ours: { median: 1, p95: 1 }, floor: { median: 2, p95: 2 }, ratio: 0.5 });
+});
+
 it('ends at the first failure', async () => {
   const { clock, works } = standing();
   const fails = async () => {
