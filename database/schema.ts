@@ -745,6 +745,7 @@ export interface SpecificationSearch {
   code: string;
   cutNodeId: string;
   fatBands: string[];
+  kind: Generated<string>;
   lexemes: Generated<string>;
   name: string;
   nodeIds: string[];

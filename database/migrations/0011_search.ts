@@ -123,8 +123,19 @@ export const search: Migration = {
       lexemes tsvector not null generated always as (
         setweight(array_to_tsvector(array[lower(code)]), 'A')
         || ${weighed('name', 'A')} || ${weighed('also', 'B')} || ${weighed('place', 'C')} || ${weighed('rest', 'D')}
-      ) stored
+      ) stored,
+      -- The same for all that no filter but the price can tell apart: counted first, so that filters are weighed once for each.
+      kind uuid not null default gen_random_uuid()
     );
+    create function name_search_kind() returns trigger language plpgsql as $$
+    begin
+      new.kind := md5(concat_ws('|', new.species, new.node_ids::text, new.source_node_id::text, new.bone_states::text,
+        new.fat_bands::text, new.portions::text, new.pack_types::text, new.ageing_kind, new.ageing_min_days::text))::uuid;
+      return new;
+    end $$;
+    create trigger specification_search_kind before insert or update on specification_search
+      for each row execute function name_search_kind();
+    create index specification_search_kinds on specification_search (kind, code);
     create unique index specification_search_code on specification_search (code);
     create index specification_search_name on specification_search (name, code);
     create index specification_search_weight on specification_search (piece_grams, code);

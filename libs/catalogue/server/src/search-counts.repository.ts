@@ -30,14 +30,8 @@ interface CountRow {
   readonly count: number;
 }
 
-/** Everything that filters look at, but the price, which is a specification's own. */
-const FACETS = sql.raw(
-  `species, primal_node_id, cut_node_id, node_ids, source_node_id, bone_states, fat_bands, portions, portion_bands,
-   ageing_kind, ageing_min_days, pack_types`,
-);
-
 /**
- * Counts in one pass over what fits the words: first how many there are of each kind, then which filters a kind misses. One
+ * Counts in one pass over what fits the words: first how many there are of each kind of row, then which filters a kind misses. One
  * that misses a single filter counts for that filter's other values, one that misses none for all, any other for nothing.
  */
 export async function countByFilter(
@@ -62,11 +56,14 @@ export async function countByFilter(
     );
   const grouped = sql`grouping(${sql.join(COUNTED.map(([, column]) => sql.raw(column)))})`;
   const { rows } = await sql<CountRow>`
-    with kinds as materialized (
-      select ${FACETS}, ${price} as priced, count(*) as many from specification_search where ${fits(words)}
-      group by ${FACETS}, priced
+    with counted as materialized (
+      select kind, ${price} as priced, count(*) as many, min(code) as code
+      from specification_search where ${fits(words)} group by kind, priced
+    ), kinds as (
+      select one.*, priced, many from counted join specification_search as one on one.code = counted.code
     ), marked as materialized (
-      select *, ${filters.stocked ? isStocked(filters.stocked) : sql`false`} as stocked, ${fails} as fails from kinds
+      select species, primal_node_id, cut_node_id, bone_states, fat_bands, portion_bands, ageing_kind, pack_types, many,
+        ${filters.stocked ? isStocked(filters.stocked) : sql`false`} as stocked, ${fails} as fails from kinds
     )
     select fails, case ${grouped} ${whens((place) => sql.lit(place))} end as at,
       case ${grouped} ${whens((_, column) => sql`to_jsonb(${sql.raw(column)})`)} end as value, sum(many)::int as count

@@ -79,7 +79,13 @@ describe('however large the catalogue', () => {
       await countByFilter(tx, { words, filters: { species: 'beef' } });
     });
     const index = 'specification_search_lexemes';
-    expect(readsOfTable(reads, 'specification_search')).toEqual([index, index]);
+    expect(readsOfTable(reads, 'specification_search')).toEqual([index, index, 'specification_search_code']);
+  });
+
+  it('counts all there is from an index alone, and looks at one specification of each kind', async () => {
+    const reads = await readsOf((tx) => countByFilter(tx, { words: [], filters: { species: 'beef' } }));
+    const indexes = ['specification_search_kinds', 'specification_search_code'];
+    expect(readsOfTable(reads, 'specification_search')).toEqual(indexes);
   });
 
   it('looks mistyped words and parts of words up among the catalogue’s words', async () => {

@@ -46,7 +46,7 @@ export async function searchWords(tx: Tx, q = ''): Promise<SearchWord[]> {
   return words.map((word, at) => {
     const own = terms.filter((each) => each.at === at).map(({ term, alike }) => ({ term, alike }));
     const [best] = own;
-    const others = own.map(({ term }) => term);
+    const others = own.map(({ term }) => term).filter((term) => best?.alike || !term.startsWith(word));
     return best?.alike ? { word: best.term, others: others.slice(1, MOST_ALIKE) } : { word, others };
   });
 }
@@ -78,7 +78,8 @@ async function lookUp<Word>(
   words: readonly Word[],
   lookedUp: (word: Word) => RawBuilder<unknown>,
 ): Promise<KnownTerm[]> {
-  const { rows } = await sql<KnownTerm>`select * from (${sql.join(words.map(lookedUp), sql` union all `)}) as looked`.execute(tx);
+  const { rows } =
+    await sql<KnownTerm>`select * from (${sql.join(words.map(lookedUp), sql` union all `)}) as looked`.execute(tx);
   return rows;
 }
 
