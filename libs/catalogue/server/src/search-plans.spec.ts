@@ -83,7 +83,8 @@ describe('however large the catalogue', () => {
   });
 
   it('counts all there is from an index alone, and looks at one specification of each kind', async () => {
-    const reads = await readsOf((tx) => countByFilter(tx, { words: [], filters: { species: 'beef' } }));
+    const everything = { words: [], filters: { species: 'beef' } } as const;
+    const reads = await readsOf((tx) => countByFilter(tx, everything), 'by-index');
     const indexes = ['specification_search_kinds', 'specification_search_code'];
     expect(readsOfTable(reads, 'specification_search')).toEqual(indexes);
   });
