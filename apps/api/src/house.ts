@@ -8,8 +8,12 @@ import {
   stripeWebhook,
   type AccountsParts,
 } from '@seamwright/accounts/server';
-import { catalogueImplementations, schemeImplementations, yieldImplementations } from '@seamwright/catalogue/server';
-import { catalogueImplementations, searchImplementations } from '@seamwright/catalogue/server';
+import {
+  catalogueImplementations,
+  schemeImplementations,
+  searchImplementations,
+  yieldImplementations,
+} from '@seamwright/catalogue/server';
 import { identityImplementations, tidyIdentity, type IdentityParts } from '@seamwright/identity/server';
 import {
   countOpenOrderLines,
@@ -18,8 +22,7 @@ import {
   type OrderingParts,
 } from '@seamwright/ordering/server';
 import { cuttingDayPort, plantImplementations, plantSubscribers } from '@seamwright/plant/server';
-import { countPriceLines, pricingImplementations, pricingPeriodic } from '@seamwright/pricing/server';
-import { pricePort, pricingImplementations, pricingPeriodic } from '@seamwright/pricing/server';
+import { countPriceLines, pricePort, pricingImplementations, pricingPeriodic } from '@seamwright/pricing/server';
 import {
   mailSubscriber,
   smtpMailer,
