@@ -729,6 +729,27 @@ export interface SiteZones {
   zoneId: string;
 }
 
+export interface SpecificationComments {
+  body: string;
+  id: string;
+  pointer: string | null;
+  saidAt: Timestamp;
+  saidBy: string;
+  specificationId: string;
+  version: number | null;
+}
+
+export interface SpecificationDrafts {
+  authoredBy: string;
+  baseVersion: number | null;
+  content: unknown;
+  createdAt: Timestamp;
+  id: string;
+  rowVersion: Generated<number>;
+  specificationId: string;
+  updatedAt: Timestamp;
+}
+
 export interface Specifications {
   code: string;
   createdAt: Timestamp;
@@ -906,6 +927,8 @@ export interface DB {
   signInSessions: SignInSessions;
   sites: Sites;
   siteZones: SiteZones;
+  specificationComments: SpecificationComments;
+  specificationDrafts: SpecificationDrafts;
   specifications: Specifications;
   specificationSearch: SpecificationSearch;
   specificationStandings: SpecificationStandings;

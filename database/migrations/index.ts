@@ -11,6 +11,7 @@ import { accounts } from './0009_accounts';
 import { yields } from './0010_yields';
 import { search } from './0011_search';
 import { unece } from './0012_unece';
+import { specificationDrafts } from './0013_specification_drafts';
 
 /** Every step of the schema in order: a static list, since a bundle has no folder to read. */
 export const MIGRATIONS: readonly Migration[] = [
@@ -26,4 +27,5 @@ export const MIGRATIONS: readonly Migration[] = [
   yields,
   search,
   unece,
+  specificationDrafts,
 ];

@@ -9,10 +9,17 @@ import {
   type Access,
 } from '@seamwright/shared/contracts';
 import { cutNodeWire, publicSpecification, specificationRow, staffSpecification } from './specification.wire';
+import { code } from './code';
+import {
+  cutNodeWire,
+  publicSpecification,
+  specificationCard,
+  specificationRow,
+  staffSpecification,
+} from './specification.wire';
 
 /** The catalogue is the same for everybody who is signed in. */
 const signedIn: Access = { who: 'roles', roles: ROLES, customer: 'none' };
-const code = z.string().regex(/^[A-Z]{2}-\d{3}$/);
 const words = z.string().trim().max(100);
 
 export const getSpecification = defineEndpoint({

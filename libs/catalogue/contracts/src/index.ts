@@ -6,7 +6,24 @@ export {
   withdrawSpecification,
 } from './catalogue.endpoints';
 export {
+  addComment,
+  approveReviewed,
+  discardDraft,
+  getDraft,
+  listComments,
+  listDrafts,
+  openDraft,
+  openSpecification,
+  saveDraft,
+  sendBackReviewed,
+  submitDraft,
+  type SpecificationComment,
+  type SpecificationDraft,
+  type SpecificationDraftRow,
+} from './drafts.endpoints';
+export {
   chosenWire,
+  type DraftContentWire,
   type PublicSpecification,
   type SpecificationCard,
   type SpecificationRow,

@@ -71,6 +71,9 @@ const pieceWeights = { pieceNominalGrams: gramsWire, pieceMinGrams: gramsWire, p
 
 const pathStep = z.strictObject({ id, level: z.enum(CUT_LEVELS), name: z.string() });
 
+const ageing = z.strictObject({ kind: z.enum(AGEING_KINDS), minDays: days, maxDays: days });
+const methodStep = z.strictObject({ text: z.string(), caution: z.string().optional() });
+
 const publicFields = {
   specificationId: id,
   versionId: id,
@@ -104,11 +107,11 @@ const publicFields = {
   storageMaxC: z.int(),
   shelfLifeDays: days,
   minLifeAtDeliveryDays: days,
-  ageing: z.strictObject({ kind: z.enum(AGEING_KINDS), minDays: days, maxDays: days }).nullable(),
+  ageing: ageing.nullable(),
   allergens: z.array(z.string()),
   mayContain: z.array(z.string()),
   cookingLossPpm: ppmWire,
-  steps: z.array(z.strictObject({ text: z.string(), caution: z.string().optional() })),
+  steps: z.array(methodStep),
   choiceRules: z.array(choiceRule),
 };
 
@@ -127,45 +130,45 @@ const versionEntry = z.strictObject({
   reason: z.string().nullable(),
 });
 
+const staffChoice = choiceOf(
+  z.strictObject({
+    ...offeredValue,
+    yieldFactorPpm: ppmWire,
+    extraSecondsPerKg: seconds,
+    extraSecondsPerPiece: seconds,
+    station: z.enum(STATIONS).optional(),
+  }),
+);
+const stationTime = z.strictObject({
+  station: z.enum(STATIONS),
+  setUpSeconds: seconds,
+  secondsPerKg: seconds,
+  secondsPerPiece: seconds,
+});
+const otherOutput = z.strictObject({
+  name: z.string(),
+  kind: z.enum(OUTPUT_KINDS),
+  yieldPpm: ppmWire,
+  valueMinorPerKg: minor,
+  visualLean: z.int().optional(),
+});
+
 /** One version as staff see it: with yields, work and what else the cut gives. */
 export const staffSpecification = z.strictObject({
   ...publicFields,
   rowVersion,
   state: z.enum(VERSION_STATES),
   standing: z.enum(STANDINGS).nullable(),
+  sourceNodeId: id,
   sourceName: z.string(),
   uneceFields: uneceFieldsWire,
   unece: versionUneceCode,
   tareGrams: gramsWire,
   yieldPpm: ppmWire,
-  choices: z.array(
-    choiceOf(
-      z.strictObject({
-        ...offeredValue,
-        yieldFactorPpm: ppmWire,
-        extraSecondsPerKg: seconds,
-        extraSecondsPerPiece: seconds,
-        station: z.enum(STATIONS).optional(),
-      }),
-    ),
-  ),
-  stations: z.array(
-    z.strictObject({
-      station: z.enum(STATIONS),
-      setUpSeconds: seconds,
-      secondsPerKg: seconds,
-      secondsPerPiece: seconds,
-    }),
-  ),
-  otherOutputs: z.array(
-    z.strictObject({
-      name: z.string(),
-      kind: z.enum(OUTPUT_KINDS),
-      yieldPpm: ppmWire,
-      valueMinorPerKg: minor,
-      visualLean: z.int().optional(),
-    }),
-  ),
+  choices: z.array(staffChoice),
+  stations: z.array(stationTime),
+  otherOutputs: z.array(otherOutput),
+  authorId: id,
   authorName: z.string(),
   approverName: z.string().nullable(),
   approvedAt: instant.nullable(),
@@ -173,6 +176,64 @@ export const staffSpecification = z.strictObject({
   versions: z.array(versionEntry),
 });
 export type StaffSpecification = z.infer<typeof staffSpecification>;
+
+const MOST_ENTRIES = 60;
+const written = (max: number) => z.string().max(max);
+const number = z.int();
+
+/**
+ * What an author wrote so far. Any field may be missing, and numbers may be out of bounds: what is wrong is told before
+ * review, and what was typed is kept until then.
+ */
+export const draftContent = z
+  .strictObject({
+    name: written(120),
+    summary: written(400),
+    sourceNodeId: id,
+    uneceItem: z
+      .string()
+      .regex(/^\d{4}$/)
+      .nullable(),
+    uneceItemSeen: z.boolean(),
+    fatCode: written(10).nullable(),
+    cuttingLines: written(2000),
+    boneState: z.enum(BONE_STATES),
+    fatCoverMm: number,
+    removed: z.array(written(60)).max(MOST_ENTRIES),
+    finish: z.enum(FINISHES),
+    drawingKind: z.enum(DRAWING_KINDS),
+    ribs: number.nullable(),
+    pieceKind: z.enum(PIECE_KINDS),
+    lengthMm: number,
+    widthMm: number,
+    heightMm: number,
+    toleranceMm: number,
+    pieceNominalGrams: number,
+    pieceMinGrams: number,
+    pieceMaxGrams: number,
+    piecesPerPack: number,
+    packsPerCase: number,
+    packType: z.enum(PACK_TYPES),
+    tareGrams: number,
+    gtin: written(14).nullable(),
+    temperatureState: z.enum(TEMPERATURE_STATES),
+    storageMinC: number,
+    storageMaxC: number,
+    shelfLifeDays: number,
+    minLifeAtDeliveryDays: number,
+    ageing: z.strictObject({ kind: z.enum(AGEING_KINDS), minDays: number, maxDays: number }).nullable(),
+    allergens: z.array(written(60)).max(MOST_ENTRIES),
+    mayContain: z.array(written(60)).max(MOST_ENTRIES),
+    yieldPpm: number,
+    cookingLossPpm: number,
+    steps: z.array(z.strictObject({ text: written(2000), caution: written(1000).optional() })).max(MOST_ENTRIES),
+    stations: z.array(stationTime).max(MOST_ENTRIES),
+    choices: z.array(staffChoice).max(MOST_ENTRIES),
+    choiceRules: z.array(choiceRule).max(MOST_ENTRIES),
+    otherOutputs: z.array(otherOutput).max(MOST_ENTRIES),
+  })
+  .partial();
+export type DraftContentWire = z.infer<typeof draftContent>;
 
 /** A row of the catalogue: enough to draw and describe it. */
 export const specificationCard = z.strictObject({

@@ -15,7 +15,7 @@ describe('the check of what an author wrote', () => {
   it.each<[string, Partial<VersionContent>]>([
     ['version-fat-cover at /fatCoverMm', { fatCoverMm: -1 }],
     ['version-fat-cover at /fatCoverMm', { fatCoverMm: 61 }],
-    ['version-dimensions at /lengthMm', { heightMm: 0 }],
+    ['version-at-least at /heightMm', { heightMm: 0 }],
     ['version-weights-order at /pieceNominalGrams', { pieceMinGrams: grams(281) }],
     ['version-weights-order at /pieceNominalGrams', { pieceMaxGrams: grams(279) }],
     ['version-life at /minLifeAtDeliveryDays', { minLifeAtDeliveryDays: 22 }],

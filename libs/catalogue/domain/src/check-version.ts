@@ -19,6 +19,7 @@ export interface UneceLists {
  */
 export function faultsOfVersion(content: VersionContent, unece?: UneceLists): Refusal[] {
   return [
+    ...faultsOfLimits(content),
     ...faultsOfNumbers(content),
     ...faultsOfText(content),
     ...faultsOfWeights(content),
@@ -30,6 +31,43 @@ export function faultsOfVersion(content: VersionContent, unece?: UneceLists): Re
 
 const fault = (code: string, pointer: string, params: Refusal['params'] = {}): Refusal => ({ code, params, pointer });
 
+/** The least and the most of each plain number; null where there is no most. */
+const LIMITS: readonly (readonly [field: keyof VersionContent, least: number, most: number | null])[] = [
+  ['lengthMm', 1, null],
+  ['widthMm', 1, null],
+  ['heightMm', 1, null],
+  ['toleranceMm', 0, null],
+  ['ribs', 1, 14],
+  ['piecesPerPack', 1, null],
+  ['packsPerCase', 1, null],
+  ['tareGrams', 0, null],
+  ['shelfLifeDays', 1, null],
+  ['minLifeAtDeliveryDays', 0, null],
+  ['yieldPpm', 1, null],
+  ['cookingLossPpm', 0, 999_999],
+];
+
+function faultsOfLimits(content: VersionContent): Refusal[] {
+  const plain = LIMITS.flatMap(([field, least, most]) => {
+    const value = content[field];
+    return typeof value === 'number' ? outOf(value, least, most, `/${field}`) : [];
+  });
+  const times = content.stations.flatMap((time, at) =>
+    [time.setUpSeconds, time.secondsPerKg, time.secondsPerPiece].some((seconds) => seconds < 0)
+      ? [fault('version-time-negative', `/stations/${at}`)]
+      : [],
+  );
+  const { ageing } = content;
+  const aged =
+    ageing && (ageing.minDays < 0 || ageing.minDays > ageing.maxDays) ? [fault('version-ageing', '/ageing')] : [];
+  return [...plain, ...times, ...aged];
+}
+
+function outOf(value: number, least: number, most: number | null, pointer: string): Refusal[] {
+  if (value < least) return [fault('version-at-least', pointer, { least })];
+  return most !== null && value > most ? [fault('version-at-most', pointer, { most })] : [];
+}
+
 function faultsOfNumbers(content: VersionContent): Refusal[] {
   const faults: Refusal[] = [];
   const outputs = content.yieldPpm + content.otherOutputs.reduce((sum, { yieldPpm }) => sum + yieldPpm, 0);
@@ -37,9 +75,6 @@ function faultsOfNumbers(content: VersionContent): Refusal[] {
     faults.push(fault('version-yields-over-one', '/yieldPpm', { percent: `${Math.ceil(outputs / 10_000)} %` }));
   }
   if (content.fatCoverMm < 0 || content.fatCoverMm > 60) faults.push(fault('version-fat-cover', '/fatCoverMm'));
-  if (Math.min(content.lengthMm, content.widthMm, content.heightMm) < 1) {
-    faults.push(fault('version-dimensions', '/lengthMm'));
-  }
   if (content.minLifeAtDeliveryDays > content.shelfLifeDays) {
     faults.push(fault('version-life', '/minLifeAtDeliveryDays'));
   }
@@ -47,11 +82,15 @@ function faultsOfNumbers(content: VersionContent): Refusal[] {
   return faults;
 }
 
-function faultsOfText({ steps, gtin }: VersionContent): Refusal[] {
+function faultsOfText({ name, cuttingLines, steps, gtin }: VersionContent): Refusal[] {
+  const unsaid = Object.entries({ name, cuttingLines })
+    .filter(([, text]) => text.trim() === '')
+    .map(([field]) => fault('version-missing', `/${field}`));
   const empty = steps.flatMap(({ text }, at) =>
     text.trim() === '' ? [fault('version-step-empty', `/steps/${at}`)] : [],
   );
-  return gtin === null || isGtin(gtin) ? empty : [...empty, fault('version-gtin', '/gtin')];
+  const found = [...unsaid, ...empty];
+  return gtin === null || isGtin(gtin) ? found : [...found, fault('version-gtin', '/gtin')];
 }
 
 /** The version's own weights and those that each single value makes of them. */

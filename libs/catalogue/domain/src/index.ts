@@ -41,6 +41,7 @@ export {
   type VersionChange,
   type VersionDifference,
 } from './difference/version-difference';
+export { completeDraft, faultsOfDraft, type DraftContent } from './draft';
 export { lineWeights, type LineWeights } from './line-weights';
 export { primalName, speciesName } from './primal-name';
 export { resolveChoices, type ResolvedSpecification } from './resolve-choices';

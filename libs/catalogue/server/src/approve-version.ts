@@ -1,5 +1,5 @@
 import { mayApprove } from '@seamwright/catalogue/domain';
-import { emit, notFound, type Caller, type Tx } from '@seamwright/shared/server';
+import { emit, notFound, stale, type Caller, type Tx } from '@seamwright/shared/server';
 import { unwrap } from '@seamwright/shared/util';
 import { cutNodes } from './cut-nodes.repository';
 import { makeFindable } from './search-index.repository';
@@ -8,11 +8,12 @@ import { actingPerson } from './write-version';
 
 /**
  * Approves a version in review: it takes the place of the one in force and can be found and ordered from now on.
- * Refuses with `own-version` when the author asks, `move-not-allowed` from any other state.
+ * Refuses with `own-version` when the author asks, `move-not-allowed` from any other state, and `stale` when it is not the
+ * row version that was read.
  */
 export async function approveVersion(
   tx: Tx,
-  { now, caller, versionId }: { now: Date; caller: Caller; versionId: string },
+  { now, caller, versionId, rowVersion }: { now: Date; caller: Caller; versionId: string; rowVersion?: number },
 ): Promise<void> {
   const approvedBy = actingPerson(caller);
   // Locked first, so that two approvals of one specification follow each other.
@@ -26,6 +27,7 @@ export async function approveVersion(
   const version = (await versionsByIds(tx, [versionId])).get(versionId);
   if (!version) throw notFound();
   unwrap(mayApprove(version, approvedBy));
+  if (rowVersion !== undefined && rowVersion !== version.rowVersion) throw stale();
   await tx
     .updateTable('specificationVersions')
     .set((eb) => ({ state: 'approved', approvedBy, approvedAt: now, rowVersion: eb('rowVersion', '+', 1) }))

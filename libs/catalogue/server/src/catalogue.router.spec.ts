@@ -16,7 +16,7 @@ import {
   type TestPeople,
   type TestTree,
 } from '@seamwright/catalogue/server/testing';
-import { catalogueImplementations } from './catalogue.router';
+import { catalogueImplementations } from './catalogue.implementations';
 
 describe('the catalogue over HTTP', () => {
   let house: TestHouse;

@@ -16,6 +16,8 @@ const read = <T>({ database, caller }: RequestContext, work: (tx: Tx) => Promise
   inTransaction(database, caller, work);
 
 export const catalogueImplementations: readonly Implementation[] = [
+export const readingImplementations: readonly Implementation[] = [
+  implement(searchSpecifications, (context, { query }) => read(context, (tx) => searchCatalogue(tx, query))),
   implement(getSpecification, (context, { params }) => read(context, (tx) => readSpecification(tx, params.code))),
   implement(getStaffSpecification, (context, { params, query }) =>
     read(context, (tx) => readStaffSpecification(tx, params.code, query.version)),

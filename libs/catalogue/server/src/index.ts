@@ -1,5 +1,5 @@
 export { approveVersion } from './approve-version';
-export { catalogueImplementations } from './catalogue.router';
+export { catalogueImplementations } from './catalogue.implementations';
 export { addCutNodes, cutNodes } from './cut-nodes.repository';
 export { addSynonym, type NewSynonym } from './keep-synonyms';
 export type { PricePort, StockPort, UsualOffer } from './search-ports';

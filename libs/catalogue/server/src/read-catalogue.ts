@@ -20,12 +20,16 @@ export async function readSpecification(tx: Tx, code: string): Promise<PublicSpe
 }
 
 /** A version as staff see it: the one asked for, else the one in force, else the newest. */
-export async function readStaffSpecification(tx: Tx, code: string, asked?: number): Promise<StaffSpecification> {
+export async function readStaffSpecification(
+  tx: Tx,
+  code: string,
+  asked?: number | 'newest',
+): Promise<StaffSpecification> {
   const specification = await specificationByCode(tx, code);
   if (!specification) throw notFound();
   const entries = await versionEntries(tx, specification.id);
   const inForce = entries.find(({ standing }) => standing === 'current');
-  const version = await versionOf(tx, specification.id, asked ?? inForce?.version);
+  const version = await versionOf(tx, specification.id, asked === 'newest' ? undefined : (asked ?? inForce?.version));
   if (!version) throw notFound();
   const people = [version.authoredBy, ...(version.approvedBy === null ? [] : [version.approvedBy])];
   return presentStaff(version, {

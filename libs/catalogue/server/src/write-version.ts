@@ -6,7 +6,7 @@ import {
   type VersionContent,
 } from '@seamwright/catalogue/domain';
 import { notFound, personOf, ProblemError, type Caller, type Tx } from '@seamwright/shared/server';
-import { newId, RefusalError, unwrap } from '@seamwright/shared/util';
+import { newId, RefusalError, unwrap, type Refusal } from '@seamwright/shared/util';
 import { cutNodes } from './cut-nodes.repository';
 import { versionsByIds } from './specifications.repository';
 import { saidFaults } from './unece.presenter';
@@ -88,4 +88,13 @@ async function refuseFaults(tx: Tx, content: VersionContent, species: Species): 
   const faults = faultsOfVersion(content, { species, values: await uneceFieldValues(tx) });
   if (faults.length === 0) return;
   throw new ProblemError(422, { code: 'invalid', params: {} }, saidFaults(faults));
+function refuseFaults(content: VersionContent): void {
+  const faults = faultsOfVersion(content);
+  if (faults.length > 0) throw refuseAll(faults);
+}
+
+/** Faults of a version as one answer, each at its field (422). */
+export function refuseAll(faults: readonly Refusal[]): ProblemError {
+  const errors = faults.map((fault) => ({ pointer: fault.pointer ?? '', message: sayRefusal(fault) }));
+  return new ProblemError(422, { code: 'invalid', params: {} }, errors);
 }

@@ -17,6 +17,7 @@ const aUneceValue = (world: World) => ({
   species: null,
   source: null,
 });
+import { aDraft, aReviewedVersion, aSpecification } from '../testing/trade';
 
 export const catalogueRows: readonly Row[] = [
   ofHouse(catalogue.searchSpecifications, () => ({ query: { q: 'steak' } })),
@@ -44,4 +45,32 @@ export const catalogueRows: readonly Row[] = [
     return { params: { id }, body: { meaning: 'Cheek', source: 'Standard, chapter 5' }, ifMatch: rowVersion };
   }),
   ofHouse(catalogue.readUnece, () => ({ query: { code: '40499000110000030050' } })),
+  ofHouse(catalogue.listDrafts, () => ({})),
+  ofHouse(catalogue.openSpecification, ({ tree, next }) => ({
+    body: { code: `LM-${100 + next()}`, cutNodeId: tree.rolledShoulderId, name: 'Rolled shoulder' },
+  })),
+  ofHouse(catalogue.openDraft, async (world) => ({ params: { code: await aSpecification(world) } })),
+  ofHouse(catalogue.getDraft, async (world) => ({ params: { code: (await aDraft(world)).code } })),
+  ofHouse(catalogue.saveDraft, async (world) => {
+    const { code, rowVersion, content } = await aDraft(world);
+    return { params: { code }, body: { content: { ...content, fatCoverMm: 9 } }, ifMatch: rowVersion };
+  }),
+  ofHouse(catalogue.discardDraft, async (world) => {
+    const { code, rowVersion } = await aDraft(world);
+    return { params: { code }, ifMatch: rowVersion };
+  }),
+  ofHouse(catalogue.submitDraft, async (world) => {
+    const { code, rowVersion } = await aDraft(world);
+    return { params: { code }, ifMatch: rowVersion };
+  }),
+  ofHouse(catalogue.approveReviewed, aReviewedVersion),
+  ofHouse(catalogue.sendBackReviewed, async (world) => ({
+    ...(await aReviewedVersion(world)),
+    body: { reason: 'Say where the cut ends.' },
+  })),
+  ofHouse(catalogue.listComments, ({ steak }) => ({ params: { code: steak.code } })),
+  ofHouse(catalogue.addComment, ({ steak }) => ({
+    params: { code: steak.code },
+    body: { version: 1, pointer: '/cuttingLines', body: 'At which rib?' },
+  })),
 ];

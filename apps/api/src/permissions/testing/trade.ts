@@ -1,3 +1,4 @@
+import { openDraft, submitDraft, type SpecificationDraft } from '@seamwright/catalogue/contracts';
 import { addCard, listInvoices } from '@seamwright/accounts/contracts';
 import { addTestSpecification } from '@seamwright/catalogue/server/testing';
 import { placeOrder, uploadOrders, type OrderDetail } from '@seamwright/ordering/contracts';
@@ -111,4 +112,18 @@ export async function aSpecification({ house, authors, tree, next }: World): Pro
   const place = { now: TEST_NOW, people: authors, cutNodeId: tree.steakId, sourceNodeId: tree.striploinId };
   await addTestSpecification(house.database, { ...place, code });
   return code;
+}
+
+/** A draft of the next version of a specification, by the technical member of staff. */
+export async function aDraft(world: World): Promise<SpecificationDraft> {
+  const code = await aSpecification(world);
+  return world.deed(world.staff.technical, openDraft, { params: { code } });
+}
+
+/** A version that one of the authors sent to review, named as for its approval. */
+export async function aReviewedVersion(world: World) {
+  const code = await aSpecification(world);
+  const draft = await world.deed(world.authors.author, openDraft, { params: { code } });
+  const reviewed = await world.deed(world.authors.author, submitDraft, { params: { code }, ifMatch: draft.rowVersion });
+  return { params: { code, version: reviewed.version }, ifMatch: reviewed.rowVersion };
 }

@@ -14,7 +14,11 @@ export const catalogueMessages = {
   'version-yields-over-one': (p) =>
     $localize`The cut and everything else it gives add up to ${p['percent']}:percent: of the primal: at most 100 % can come out.`,
   'version-fat-cover': () => $localize`The fat cover must be between 0 and 60 mm.`,
-  'version-dimensions': () => $localize`Length, width and height must each be at least 1 mm.`,
+  'version-missing': () => $localize`Fill this in before it goes to review.`,
+  'version-at-least': (p) => $localize`This must be at least ${p['least']}:least:.`,
+  'version-at-most': (p) => $localize`This must be at most ${p['most']}:most:.`,
+  'version-time-negative': () => $localize`Minutes can't be below zero.`,
+  'version-ageing': () => $localize`The shortest ageing can't be longer than the longest, nor below zero days.`,
   'version-step-empty': () => $localize`Say what is done in this step, or take it out.`,
   'version-life': () => $localize`The life left at delivery can't be longer than the shelf life.`,
   'version-storage': () => $localize`The lowest storage temperature can't be above the highest.`,
@@ -44,4 +48,9 @@ export const catalogueMessages = {
   'unece-species-unlisted': () => $localize`The list of field 1 has no number for this species yet.`,
   'unece-value-taken': () => $localize`The list of this field has that value already.`,
   'unece-species-taken': () => $localize`Another value of field 1 stands for this species already.`,
+  'specification-code-taken': (p) => $localize`There is a specification ${p['code']}:code: already.`,
+  'draft-open': (p) => $localize`${p['author']}:author: is writing the next version already.`,
+  'draft-of-another': (p) =>
+    $localize`Only ${p['author']}:author: can change this draft. Leave a comment beside the field.`,
+  'version-in-review': () => $localize`A version is in review. Approve it or send it back before the next is written.`,
 } satisfies MessageTable;

@@ -102,7 +102,7 @@ async function answer(
 
 /** Checks params, query and body against the declaration, gathering every fault. */
 function check(endpoint: AnyEndpoint, request: Request): CheckedInput<AnyEndpoint> {
-  const params = endpoint.params.safeParse(request.params);
+  const params = endpoint.params.safeParse(coerceQuery(endpoint.params, request.params));
   // An id of the wrong form in the address can't be anybody's.
   if (!params.success) throw refusal('not-found');
   const query = endpoint.query.safeParse(coerceQuery(endpoint.query, request.query as Record<string, unknown>));
