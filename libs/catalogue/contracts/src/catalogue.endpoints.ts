@@ -1,22 +1,7 @@
 import * as z from 'zod';
-import {
-  defineEndpoint,
-  line,
-  pageOf,
-  pageQuery,
-  ROLES,
-  staffOnly,
-  type Access,
-} from '@seamwright/shared/contracts';
-import { cutNodeWire, publicSpecification, specificationRow, staffSpecification } from './specification.wire';
+import { defineEndpoint, line, pageOf, pageQuery, ROLES, staffOnly, type Access } from '@seamwright/shared/contracts';
 import { code } from './code';
-import {
-  cutNodeWire,
-  publicSpecification,
-  specificationCard,
-  specificationRow,
-  staffSpecification,
-} from './specification.wire';
+import { cutNodeWire, publicSpecification, specificationRow, staffSpecification } from './specification.wire';
 
 /** The catalogue is the same for everybody who is signed in. */
 const signedIn: Access = { who: 'roles', roles: ROLES, customer: 'none' };

@@ -231,6 +231,7 @@ export const draftContent = z
     choices: z.array(staffChoice).max(MOST_ENTRIES),
     choiceRules: z.array(choiceRule).max(MOST_ENTRIES),
     otherOutputs: z.array(otherOutput).max(MOST_ENTRIES),
+    uneceFields: uneceFieldsWire,
   })
   .partial();
 export type DraftContentWire = z.infer<typeof draftContent>;

@@ -25,6 +25,7 @@ const LEFT_OPEN = {
   choices: [],
   choiceRules: [],
   otherOutputs: [],
+  uneceFields: {},
 } as const satisfies DraftContent;
 
 type MustBeSaid = Omit<VersionContent, keyof typeof LEFT_OPEN>;

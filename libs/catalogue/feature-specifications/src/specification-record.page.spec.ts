@@ -17,6 +17,8 @@ const record: StaffSpecification = {
   standing: 'current',
   uneceFields: {},
   unece: { reading: null, faults: [] },
+  sourceNodeId: '00000000-0000-7000-8000-0000000000c1',
+  authorId: '00000000-0000-7000-8000-0000000000b1',
   sourceName: 'Striploin',
   tareGrams: 18,
   yieldPpm: 780_000,

@@ -8,16 +8,13 @@ import {
 import { implement, inTransaction, type Implementation, type RequestContext, type Tx } from '@seamwright/shared/server';
 import { cutNodes } from './cut-nodes.repository';
 import { listNewestVersions, readSpecification, readStaffSpecification } from './read-catalogue';
-import { synonymImplementations } from './synonyms.router';
-import { uneceImplementations } from './unece.router';
 import { withdrawSpecification } from './withdraw-specification';
 
 const read = <T>({ database, caller }: RequestContext, work: (tx: Tx) => Promise<T>): Promise<T> =>
   inTransaction(database, caller, work);
 
-export const catalogueImplementations: readonly Implementation[] = [
+/** Reading specifications and the cut tree, and withdrawing. */
 export const readingImplementations: readonly Implementation[] = [
-  implement(searchSpecifications, (context, { query }) => read(context, (tx) => searchCatalogue(tx, query))),
   implement(getSpecification, (context, { params }) => read(context, (tx) => readSpecification(tx, params.code))),
   implement(getStaffSpecification, (context, { params, query }) =>
     read(context, (tx) => readStaffSpecification(tx, params.code, query.version)),
@@ -30,6 +27,4 @@ export const readingImplementations: readonly Implementation[] = [
     }),
   ),
   implement(getCutTree, (context) => read(context, async (tx) => ({ nodes: [...(await cutNodes(tx)).values()] }))),
-  ...synonymImplementations,
-  ...uneceImplementations,
 ];

@@ -59,7 +59,7 @@ describe('writing a specification over HTTP', () => {
     const approval = { params: { code, version: 1 }, ifMatch: sent.rowVersion };
 
     const own = await house.call(people.author, approveReviewed, approval);
-    expect([own.status, own.problem?.code]).toEqual([409, 'own-version']);
+    expect([own.status, own.problem?.code]).toEqual([422, 'own-version']);
     const stale = await house.call(people.approver, approveReviewed, { ...approval, ifMatch: sent.rowVersion + 1 });
     expect(stale.status).toBe(412);
     const done = await house.call(people.approver, approveReviewed, approval);
@@ -127,7 +127,9 @@ describe('writing a specification over HTTP', () => {
       [2, 'current'],
       [1, 'superseded'],
     ]);
-    expect((await house.call(people.approver, sendBackReviewed, { ...approval, body: { reason: 'Late' } })).status).toBe(409);
+    expect(
+      (await house.call(people.approver, sendBackReviewed, { ...approval, body: { reason: 'Late' } })).status,
+    ).toBe(409);
   });
 
   it('is thrown away with its specification when there is no version, and its code is free again', async () => {

@@ -17,7 +17,7 @@ import {
 import type { Caller } from '@seamwright/shared/server';
 import { openTestHouse, TEST_NOW, type TestHouse } from '@seamwright/shared/server/testing';
 import { grams, newId } from '@seamwright/shared/util';
-import { catalogueImplementations } from './catalogue.router';
+import { catalogueImplementations } from './catalogue.implementations';
 import type { PricePort, StockPort } from './search-ports';
 import { searchImplementations } from './search.router';
 

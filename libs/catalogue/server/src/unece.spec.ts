@@ -15,7 +15,7 @@ import {
 import { inTransaction, system, type Caller } from '@seamwright/shared/server';
 import { openTestHouse, TEST_NOW, type TestHouse } from '@seamwright/shared/server/testing';
 import { newId } from '@seamwright/shared/util';
-import { catalogueImplementations } from './catalogue.router';
+import { catalogueImplementations } from './catalogue.implementations';
 
 describe('the UNECE code of the house', () => {
   let house: TestHouse;

@@ -86,15 +86,9 @@ export async function submitVersion(tx: Tx, versionId: string): Promise<void> {
 
 async function refuseFaults(tx: Tx, content: VersionContent, species: Species): Promise<void> {
   const faults = faultsOfVersion(content, { species, values: await uneceFieldValues(tx) });
-  if (faults.length === 0) return;
-  throw new ProblemError(422, { code: 'invalid', params: {} }, saidFaults(faults));
-function refuseFaults(content: VersionContent): void {
-  const faults = faultsOfVersion(content);
   if (faults.length > 0) throw refuseAll(faults);
 }
 
 /** Faults of a version as one answer, each at its field (422). */
-export function refuseAll(faults: readonly Refusal[]): ProblemError {
-  const errors = faults.map((fault) => ({ pointer: fault.pointer ?? '', message: sayRefusal(fault) }));
-  return new ProblemError(422, { code: 'invalid', params: {} }, errors);
-}
+export const refuseAll = (faults: readonly Refusal[]): ProblemError =>
+  new ProblemError(422, { code: 'invalid', params: {} }, saidFaults(faults));

@@ -1,6 +1,6 @@
 import * as catalogue from '@seamwright/catalogue/contracts';
 import { ofHouse, type Row } from '../row';
-import { aSpecification } from '../testing/trade';
+import { aReviewedVersion, aSpecification, aSpecificationDraft } from '../testing/trade';
 import type { World } from '../testing/world';
 
 const aSynonym = (world: World) => ({
@@ -17,7 +17,6 @@ const aUneceValue = (world: World) => ({
   species: null,
   source: null,
 });
-import { aDraft, aReviewedVersion, aSpecification } from '../testing/trade';
 
 export const catalogueRows: readonly Row[] = [
   ofHouse(catalogue.searchSpecifications, () => ({ query: { q: 'steak' } })),
@@ -50,17 +49,17 @@ export const catalogueRows: readonly Row[] = [
     body: { code: `LM-${100 + next()}`, cutNodeId: tree.rolledShoulderId, name: 'Rolled shoulder' },
   })),
   ofHouse(catalogue.openDraft, async (world) => ({ params: { code: await aSpecification(world) } })),
-  ofHouse(catalogue.getDraft, async (world) => ({ params: { code: (await aDraft(world)).code } })),
+  ofHouse(catalogue.getDraft, async (world) => ({ params: { code: (await aSpecificationDraft(world)).code } })),
   ofHouse(catalogue.saveDraft, async (world) => {
-    const { code, rowVersion, content } = await aDraft(world);
+    const { code, rowVersion, content } = await aSpecificationDraft(world);
     return { params: { code }, body: { content: { ...content, fatCoverMm: 9 } }, ifMatch: rowVersion };
   }),
   ofHouse(catalogue.discardDraft, async (world) => {
-    const { code, rowVersion } = await aDraft(world);
+    const { code, rowVersion } = await aSpecificationDraft(world);
     return { params: { code }, ifMatch: rowVersion };
   }),
   ofHouse(catalogue.submitDraft, async (world) => {
-    const { code, rowVersion } = await aDraft(world);
+    const { code, rowVersion } = await aSpecificationDraft(world);
     return { params: { code }, ifMatch: rowVersion };
   }),
   ofHouse(catalogue.approveReviewed, aReviewedVersion),

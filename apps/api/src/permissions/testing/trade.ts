@@ -115,7 +115,7 @@ export async function aSpecification({ house, authors, tree, next }: World): Pro
 }
 
 /** A draft of the next version of a specification, by the technical member of staff. */
-export async function aDraft(world: World): Promise<SpecificationDraft> {
+export async function aSpecificationDraft(world: World): Promise<SpecificationDraft> {
   const code = await aSpecification(world);
   return world.deed(world.staff.technical, openDraft, { params: { code } });
 }

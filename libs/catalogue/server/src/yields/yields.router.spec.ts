@@ -30,7 +30,7 @@ import { inTransaction } from '@seamwright/shared/server';
 import { openTestHouse, TEST_NOW, type TestHouse } from '@seamwright/shared/server/testing';
 import { newId } from '@seamwright/shared/util';
 import { approveVersion } from '../approve-version';
-import { catalogueImplementations } from '../catalogue.router';
+import { catalogueImplementations } from '../catalogue.implementations';
 import { schemeImplementations } from '../schemes/schemes.router';
 import { yieldImplementations } from './yields.router';
 
