@@ -69,8 +69,12 @@ it('has a row for each row of the screen, with its numbers', async () => {
   const rows = rowsOf('Cutting list');
   for (const { primal, rows: cuts, totals } of cutting.primals) {
     for (const { cut, pieces, outGrams } of cuts)
-      expect(rows).toContainEqual(expect.arrayContaining([primalName(primal.species, primal.name), cut.code, cut.name, pieces, outGrams / 1000]));
-    expect(rows.find(([first]) => first === `${primalName(primal.species, primal.name)} in all`)?.[7]).toBe(totals.outGrams / 1000);
+      expect(rows).toContainEqual(
+        expect.arrayContaining([primalName(primal.species, primal.name), cut.code, cut.name, pieces, outGrams / 1000]),
+      );
+    expect(rows.find(([first]) => first === `${primalName(primal.species, primal.name)} in all`)?.[7]).toBe(
+      totals.outGrams / 1000,
+    );
   }
   expect(rows.flat().some((cell) => typeof cell === 'object' && cell !== null && 'formula' in cell)).toBe(false);
 });

@@ -13,7 +13,10 @@ export function primalNames(): (lot: LotWire) => string {
     inject(LotReceipts)
       .primals()
       .pipe(
-        map(({ items }): ReadonlyMap<string, string> => new Map(items.map(({ id, species, name }) => [id, primalName(species, name)]))),
+        map(
+          ({ items }): ReadonlyMap<string, string> =>
+            new Map(items.map(({ id, species, name }) => [id, primalName(species, name)])),
+        ),
         catchError(() => of(NONE)),
       ),
     { initialValue: NONE },
